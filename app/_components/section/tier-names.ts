@@ -1,0 +1,33 @@
+/** What a tier is called where it has no name of its own. */
+
+interface Named {
+  id: string;
+  name?: string | undefined;
+  topHeightM: number;
+}
+
+const ORDINALS = ['Second', 'Third', 'Fourth', 'Fifth', 'Sixth', 'Seventh'];
+
+function placeName(place: number, count: number): string {
+  if (count === 1) return 'The tier';
+  if (count === 2) return place === 0 ? 'Lower tier' : 'Upper tier';
+  if (place === 0) return 'Bottom tier';
+  if (place === count - 1) return 'Top tier';
+  if (count === 3) return 'Middle tier';
+  return `${ORDINALS[place - 1] ?? `${place + 1}th`} tier`;
+}
+
+export function tierName(tiers: readonly Named[], id: string): string {
+  const upward = [...tiers].sort((a, b) => a.topHeightM - b.topHeightM);
+  const place = upward.findIndex((tier) => tier.id === id);
+  if (place < 0) return 'No tier';
+  return upward[place]!.name?.trim() || placeName(place, tiers.length);
+}
+
+/** The name inside a sentence: "over the upper tier", but a name of its own keeps its capital. */
+export function tierNameInside(tiers: readonly Named[], id: string): string {
+  const own = tiers.find((tier) => tier.id === id)?.name?.trim();
+  if (own) return own;
+  const name = tierName(tiers, id);
+  return name === 'The tier' ? 'the tier' : `the ${name[0]!.toLowerCase()}${name.slice(1)}`;
+}
