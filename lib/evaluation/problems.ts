@@ -1,0 +1,96 @@
+import type { z } from 'zod';
+import type { LightScene } from '@/physics/light/light-documents';
+import type { ScenarioDocument } from '@/physics/plan/scenario-document';
+import { expectationOf } from './fields';
+import { lightSceneSchema } from './light-scene.schema';
+import { scenarioSchema } from './scenario.schema';
+
+/** One thing wrong with a document: where, what stands there, what may. */
+export interface DocumentProblem {
+  path: string;
+  value: unknown;
+  range: string;
+  unit: string;
+  message: string;
+}
+
+export type Parsed<T> = { ok: true; value: T } | { ok: false; problems: DocumentProblem[] };
+
+const MOST_PROBLEMS = 100;
+
+export function pathText(path: readonly PropertyKey[]): string {
+  return path.reduce<string>(
+    (text, key) => (typeof key === 'number' ? `${text}[${key}]` : text === '' ? String(key) : `${text}.${String(key)}`),
+    '',
+  );
+}
+
+function valueAt(input: unknown, path: readonly PropertyKey[]): unknown {
+  return path.reduce<unknown>(
+    (value, key) =>
+      typeof value === 'object' && value !== null ? (value as Record<PropertyKey, unknown>)[key] : undefined,
+    input,
+  );
+}
+
+/** Short enough for a line: a long list is no help to anybody. */
+function brief(value: unknown): unknown {
+  if (value === undefined) return 'missing';
+  if (typeof value === 'number' && !Number.isFinite(value)) return String(value);
+  const text = JSON.stringify(value) ?? String(value);
+  return text.length > 80 ? `${text.slice(0, 77)}…` : value;
+}
+
+type Issue = z.core.$ZodIssue;
+
+/** A union's own issue says only that nothing fitted; the branch that came furthest says why. */
+function innermost(issue: Issue): Issue[] {
+  if (issue.code !== 'invalid_union' || !issue.errors || issue.errors.length === 0) return [issue];
+  const depth = (branch: Issue[]) => Math.max(0, ...branch.map((each) => each.path.length));
+  const best = [...issue.errors].sort((a, b) => depth(b) - depth(a))[0]!;
+  if (depth(best) === 0) return [issue];
+  return best.flatMap((each) => innermost({ ...each, path: [...issue.path, ...each.path] } as Issue));
+}
+
+function problemOf(issue: Issue, input: unknown): DocumentProblem[] {
+  if (issue.code === 'unrecognized_keys') {
+    return issue.keys.map((key) => ({
+      path: pathText([...issue.path, key]),
+      value: brief(valueAt(input, [...issue.path, key])),
+      range: 'no such key',
+      unit: '',
+      message: 'This key is not known here. Take it out or correct its name.',
+    }));
+  }
+  const expected = expectationOf(issue.message);
+  const missing = issue.code === 'invalid_type' && valueAt(input, issue.path) === undefined;
+  return [
+    {
+      path: pathText(issue.path),
+      value: brief(valueAt(input, issue.path)),
+      range: expected?.range ?? 'see message',
+      unit: expected?.unit ?? '',
+      message:
+        missing && !expected
+          ? 'This is missing.'
+          : issue.message.startsWith('Invalid input')
+            ? 'This has the wrong form or is missing.'
+            : issue.message,
+    },
+  ];
+}
+
+export function toProblems(error: z.ZodError, input: unknown): DocumentProblem[] {
+  return error.issues
+    .flatMap(innermost)
+    .flatMap((issue) => problemOf(issue, input))
+    .slice(0, MOST_PROBLEMS);
+}
+
+function parse<T>(schema: z.ZodType<T>, input: unknown): Parsed<T> {
+  const result = schema.safeParse(input);
+  return result.success ? { ok: true, value: result.data } : { ok: false, problems: toProblems(result.error, input) };
+}
+
+export const parseScenarioDocument = (input: unknown): Parsed<ScenarioDocument> => parse(scenarioSchema, input);
+export const parseLightScene = (input: unknown): Parsed<LightScene> => parse(lightSceneSchema, input);
