@@ -1,0 +1,44 @@
+import { figureText } from './figure';
+
+const symbols: Record<string, string> = {
+  EUR: '€',
+  GBP: '£',
+  USD: '$',
+  CAD: 'CA$',
+  AUD: 'A$',
+  NZD: 'NZ$',
+  CHF: 'CHF',
+  NOK: 'NOK',
+  SEK: 'SEK',
+  DKK: 'DKK',
+  ISK: 'ISK',
+  PLN: 'PLN',
+  CZK: 'CZK',
+  JPY: '¥',
+};
+
+export const currencies = Object.keys(symbols);
+
+/** How many minor units one major unit has: 100 for most, 1 for some. */
+export function minorPerMajor(currency: string): number {
+  try {
+    const digits =
+      new Intl.NumberFormat('en', { style: 'currency', currency }).resolvedOptions().maximumFractionDigits ?? 2;
+    return 10 ** digits;
+  } catch {
+    return 100;
+  }
+}
+
+export const currencySymbol = (currency: string): string => symbols[currency] ?? currency;
+
+/** An amount of money in major units: `€ 54.60`, `£ 1 240` where the pennies would only be noise. */
+export function formatMoney(major: number, currency: string, options: { digits?: number } = {}): string {
+  const most = Math.log10(minorPerMajor(currency));
+  const digits = options.digits ?? (Math.abs(major) >= 1000 ? 0 : most);
+  const figure = figureText(major, Math.min(digits, Math.max(most, digits)));
+  return `${figure.startsWith('−') ? '−' : ''}${currencySymbol(currency)} ${figure.replace('−', '')}`;
+}
+
+export const formatMinor = (minor: number, currency: string): string =>
+  formatMoney(minor / minorPerMajor(currency), currency);

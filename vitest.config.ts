@@ -1,0 +1,35 @@
+import { fileURLToPath } from 'node:url';
+import { defineConfig } from 'vitest/config';
+
+const root = fileURLToPath(new URL('.', import.meta.url));
+const alias = {
+  '@/': root,
+  // The marker that keeps server files out of the browser's bundle has nothing to guard here.
+  'server-only': fileURLToPath(new URL('./tests/support/server-only.ts', import.meta.url)),
+};
+
+export default defineConfig({
+  resolve: { alias },
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'unit',
+          include: ['tests/**/*.test.ts', 'tests/**/*.test.tsx'],
+          exclude: ['tests/**/*.db.test.ts', 'tests/e2e/**'],
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'database',
+          include: ['tests/**/*.db.test.ts'],
+          globalSetup: ['tests/support/database.ts'],
+          fileParallelism: false,
+          testTimeout: 30_000,
+        },
+      },
+    ],
+  },
+});
