@@ -1,0 +1,163 @@
+import { designStates } from '../heat/design-states';
+import { boxOf } from '../heat/tent-model';
+import { FABRIC_CAPACITY_J_K, heaterCycles } from '../heat/thermostat';
+import { REFLECTED_IS_AN_ESTIMATE } from '../light/evaluate-light-scene';
+import type { LightCache } from '../light/light-field';
+import { solveTierLight, type TierLight } from '../light/tier-light';
+import { cautionsFor } from './cautions';
+import { circuitResults } from './circuits';
+import type { Evaluation, HeatResult, MonthResult, YearResult } from './evaluation-document';
+import { physicsVersion } from './physics-version';
+import { resolveScenario } from './resolve-scenario';
+import type { ResolvedScenario } from './resolved-scenario';
+import type { ScenarioDocument } from './scenario-document';
+import { tierResults } from './tier-results';
+import { roomYear, simulateYear, type RoomYear } from './year';
+
+export interface EvaluateOptions {
+  /** false leaves the year at zero: light and design states alone, for a lamp that is being dragged. */
+  year?: boolean;
+  lightCache?: LightCache;
+}
+
+/** What is placed and not had already, in minor units. */
+function upFrontMinor(scenario: ResolvedScenario): number {
+  const lamps = scenario.fixtures.reduce((sum, fixture) => {
+    const placed = scenario.placements.filter((placement) => placement.fixture === fixture.id).length;
+    return sum + Math.max(0, placed - fixture.owned) * fixture.priceMinor;
+  }, 0);
+  const { heater, exhaust } = scenario.climate;
+  return (
+    lamps + (heater && !heater.owned ? heater.priceMinor : 0) + (exhaust && !exhaust.owned ? exhaust.priceMinor : 0)
+  );
+}
+
+const noEnergy = () => ({ light: 0, heater: 0, exhaust: 0, circulation: 0, pump: 0 });
+
+function emptyYear(): YearResult {
+  const months = Array.from({ length: 12 }, (_, index): MonthResult => ({
+    month: index + 1,
+    energyKwh: { ...noEnergy(), total: 0 },
+    cost: 0,
+    costByDevice: noEnergy(),
+    airTempC: { min: 0, mean: 0, max: 0 },
+    relHumidityPct: { min: 0, mean: 0, max: 0 },
+    vpdKpa: { mean: 0 },
+    unmetHeatKh: 0,
+    overheatKh: 0,
+    condensationH: 0,
+    waterL: 0,
+  }));
+  return {
+    months,
+    energyKwh: { ...noEnergy(), total: 0 },
+    cost: 0,
+    costByDevice: noEnergy(),
+    co2Kg: 0,
+    peakPowerW: 0,
+    netLightEnergyKwh: 0,
+    heaterCyclesPerH: 0,
+  };
+}
+
+const darkened = (scenario: ResolvedScenario): ResolvedScenario => ({
+  ...scenario,
+  placements: scenario.placements.map((placement) => ({ ...placement, dimFrac: 0 })),
+});
+
+const darkenedLight = (lights: readonly TierLight[]): TierLight[] =>
+  lights.map((light) => ({ ...light, byPlacement: light.byPlacement.map((own) => ({ ...own, meanPpfdUmolM2S: 0 })) }));
+
+/** Thermostat cycling on the design night, of air and fabric alone. */
+function cyclesOf(scenario: ResolvedScenario, heat: HeatResult): number {
+  const heater = scenario.climate.heater;
+  const { coldDark } = heat;
+  const rise = coldDark.tentTempC - coldDark.roomTempC;
+  if (!heater || rise <= 0 || coldDark.lossW <= 0) return 0;
+  const conductanceWK = coldDark.lossW / rise;
+  const capacityJK = 1.2 * 1006 * boxOf(scenario.tent).volumeM3 + FABRIC_CAPACITY_J_K;
+  const freeTempC = coldDark.roomTempC + coldDark.gainW / conductanceWK;
+  return heaterCycles({
+    ratedPowerW: heater.ratedPowerW,
+    conductanceWK,
+    capacityJK,
+    setTempC: coldDark.tentTempC,
+    freeTempC,
+  });
+}
+
+function wholeYear(
+  scenario: ResolvedScenario,
+  lights: readonly TierLight[],
+  room: RoomYear,
+  heat: HeatResult,
+): YearResult {
+  const year = simulateYear(scenario, lights, room);
+  const dark = simulateYear(darkened(scenario), darkenedLight(lights), room);
+  return {
+    ...year,
+    netLightEnergyKwh: year.energyKwh.total - dark.energyKwh.total,
+    heaterCyclesPerH: cyclesOf(scenario, heat),
+  };
+}
+
+function warningsOf(scenario: ResolvedScenario, heat: HeatResult, withYear: boolean): string[] {
+  const warnings: string[] = [];
+  const { reflectance } = scenario.tent;
+  if (scenario.placements.length > 0 && Object.values(reflectance).some((value) => value > 0))
+    warnings.push(REFLECTED_IS_AN_ESTIMATE);
+  if (withYear)
+    warnings.push(
+      'The year is a steady balance of each hour; what the tent stores from one hour to the next is left out.',
+    );
+  const tooMoist = [
+    heat.moistureAirflowM3H.dark === null ? 'night' : null,
+    heat.moistureAirflowM3H.light === null ? 'day' : null,
+  ].filter((each) => each !== null);
+  if (tooMoist.length > 0)
+    warnings.push(
+      `The room's air is too moist to dry the tent by ${tooMoist.join(' and by ')}: no airflow holds ${scenario.climate.maxRelHumidityPct} %, and humidity runs towards 100 %.`,
+    );
+  const largestW =
+    Math.max(...['coldDark', 'coldDawn', 'coldLight'].map((key) => heat[key as 'coldDark'].heaterW)) * 1.25;
+  if (largestW > 3000)
+    warnings.push(`The heater needed, ${Math.round(largestW)} W, is larger than any plug-in heater.`);
+  return warnings;
+}
+
+/**
+ * Everything that the physics says of a scenario.
+ *
+ * @param document scenario/1, checked
+ * @returns evaluation/1; `elapsedMs` is 0, the caller has the clock
+ * @throws DomainError for what is physically impossible
+ * @accuracy see the parts: light/evaluate-light-scene.ts, heat/tent-state.ts, plan/year.ts
+ */
+export function evaluateScenario(
+  document: ScenarioDocument,
+  { year: withYear = true, lightCache }: EvaluateOptions = {},
+): Evaluation {
+  const { scenario, assumptions } = resolveScenario(document);
+  const lights = solveTierLight(scenario, lightCache);
+  const room = roomYear(scenario);
+  const continuousWithoutHeaterA = circuitResults(scenario, { without: 'heater' }).map(
+    (circuit) => circuit.continuousA,
+  );
+  const heat = designStates({ scenario, lights, year: room, continuousWithoutHeaterA });
+  const facts = {
+    tiers: tierResults(scenario, lights),
+    heat,
+    year: withYear ? wholeYear(scenario, lights, room, heat) : emptyYear(),
+    circuits: circuitResults(scenario),
+  };
+  return {
+    schema: 'evaluation/1',
+    physicsVersion,
+    ...facts,
+    upFront: { costMinor: upFrontMinor(scenario) },
+    cautions: cautionsFor({ scenario, ...facts }),
+    assumptions,
+    warnings: warningsOf(scenario, heat, withYear),
+    elapsedMs: { light: 0, year: 0 },
+  };
+}
