@@ -1,4 +1,4 @@
-/** One process that brings a database to where the app needs it: migrations, a check of the reference data, the demo where asked. */
+/** One process that brings a database to where the app needs it: migrations, then the demo where it is asked for. */
 import { migrateToLatest, roleOf } from '../db/migrate';
 
 const need = (name: string): string => {

@@ -1,31 +1,77 @@
 import { spawn } from 'node:child_process';
 
-/** Runs a command to its end and gives back what it printed; throws with the last lines when it fails. */
-export function run(command, args, { env, cwd, uid, gid, input, allowFailure = false } = {}) {
+/** Children that run now. Each leads its own process group, so that Ctrl-C reaches this script alone and it ends them in order. */
+const live = new Set();
+let halted = false;
+
+const signalGroup = (child, signal) => {
+  try {
+    process.kill(-child.pid, signal);
+  } catch {
+    // It ended by itself in the meantime.
+  }
+};
+
+/** Ends every command that runs now and lets no other start. */
+export function haltRuns() {
+  halted = true;
+  for (const child of live) signalGroup(child, 'SIGTERM');
+}
+
+export class Halted extends Error {
+  constructor() {
+    super('stopped by a signal');
+  }
+}
+
+/**
+ * Runs a command to its end and gives back what it printed; throws with the last lines when it fails.
+ *
+ * @param onOutput called with each piece of output as it comes
+ * @param always runs even while everything else is being halted: the commands that shut things down
+ */
+export function run(command, args, { env, cwd, uid, gid, input, onOutput, allowFailure = false, always = false } = {}) {
+  if (halted && !always) return Promise.reject(new Halted());
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, {
       env,
       cwd,
       uid,
       gid,
+      detached: true,
       stdio: [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'],
     });
+    if (!always) live.add(child);
     let output = '';
     const keep = (chunk) => {
       output += chunk;
+      onOutput?.(String(chunk));
     };
     child.stdout.on('data', keep);
     child.stderr.on('data', keep);
-    if (input !== undefined) child.stdin.end(input);
-    child.on('error', reject);
-    child.on('close', (code) => {
-      if (code === 0 || allowFailure) resolve({ code, output });
-      else
-        reject(
-          new Error(`${command} ${args.join(' ')} ended with ${code}\n${output.split('\n').slice(-40).join('\n')}`),
-        );
+    if (input !== undefined) {
+      child.stdin.on('error', () => {});
+      child.stdin.end(input);
+    }
+    child.on('error', (error) => {
+      live.delete(child);
+      reject(error);
+    });
+    child.on('close', (code, signal) => {
+      live.delete(child);
+      if (halted && !always) reject(new Halted());
+      else if (code === 0 || allowFailure) resolve({ code, output });
+      else reject(failure(command, args, code ?? signal, output));
     });
   });
+}
+
+function failure(command, args, ending, output) {
+  const error = new Error(
+    `${command} ${args.join(' ')} ended with ${ending}\n${output.split('\n').slice(-60).join('\n')}`,
+  );
+  error.output = output;
+  return error;
 }
 
 /** npm as this process was started by it, or as it stands on the path. */

@@ -1,7 +1,12 @@
 /** One line for each step; long ones say how long they have been at it. */
 const started = Date.now();
+const PROGRESS_EVERY_MS = 10_000;
 
 const seconds = (ms) => `${(ms / 1000).toFixed(1)} s`;
+
+// A reader that went away (`npm start | head`) is no reason to leave the database running.
+process.stdout.on('error', () => {});
+process.stderr.on('error', () => {});
 
 export function say(line) {
   process.stdout.write(`${line}\n`);
@@ -11,17 +16,19 @@ export function say(line) {
 export async function step(name, work) {
   const from = Date.now();
   const live = process.stdout.isTTY;
-  const show = () => process.stdout.write(`\r${name} … ${seconds(Date.now() - from)} `);
+  let doing = '';
+  const line = () => `${name} … ${seconds(Date.now() - from)}${doing && `, ${doing}`}`;
   const timer = live
-    ? setInterval(show, 500)
-    : setInterval(() => say(`${name} … ${seconds(Date.now() - from)}`), 20_000);
+    ? setInterval(() => process.stdout.write(`\r\x1b[K${line()}`), 500)
+    : setInterval(() => say(line()), PROGRESS_EVERY_MS);
+  const end = (words) => {
+    clearInterval(timer);
+    say(`${live ? '\r\x1b[K' : ''}${name}: ${words} (${seconds(Date.now() - from)})`);
+  };
   try {
-    const note = await work();
-    clearInterval(timer);
-    say(`${live ? '\r' : ''}${name}: ${note ?? 'done'} (${seconds(Date.now() - from)})`);
+    end((await work((words) => (doing = words))) ?? 'done');
   } catch (error) {
-    clearInterval(timer);
-    say(`${live ? '\r' : ''}${name}: failed after ${seconds(Date.now() - from)}`);
+    end('not finished');
     throw error;
   }
 }
