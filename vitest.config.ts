@@ -11,6 +11,7 @@ const alias = {
 export default defineConfig({
   resolve: { alias },
   test: {
+    maxWorkers: 2,
     projects: [
       {
         extends: true,

@@ -168,6 +168,13 @@ export async function startCluster({ stateFolder, name = 'pg', database = 'cella
   };
 }
 
+/** The cluster that a state folder remembers, to stop or remove it; null when there is none. */
+export function findCluster({ stateFolder, name = 'pg' }) {
+  const folder = recall(path.join(stateFolder, `${name}.secrets.json`))?.folder;
+  if (!folder || !existsSync(folder)) return null;
+  return { folder, stop: () => stopServer({ folder, as: asPostgres() }) };
+}
+
 /** Stops a throw-away cluster and removes it. */
 export async function removeCluster(cluster) {
   await cluster.stop();

@@ -1,21 +1,14 @@
 import { spawn } from 'node:child_process';
+import { signal } from './processes.mjs';
 
 /** Children that run now. Each leads its own process group, so that Ctrl-C reaches this script alone and it ends them in order. */
 const live = new Set();
 let halted = false;
 
-const signalGroup = (child, signal) => {
-  try {
-    process.kill(-child.pid, signal);
-  } catch {
-    // It ended by itself in the meantime.
-  }
-};
-
 /** Ends every command that runs now and lets no other start. */
 export function haltRuns() {
   halted = true;
-  for (const child of live) signalGroup(child, 'SIGTERM');
+  for (const child of live) signal(-child.pid, 'SIGTERM');
 }
 
 export class Halted extends Error {
@@ -57,11 +50,11 @@ export function run(command, args, { env, cwd, uid, gid, input, onOutput, allowF
       live.delete(child);
       reject(error);
     });
-    child.on('close', (code, signal) => {
+    child.on('close', (code, by) => {
       live.delete(child);
       if (halted && !always) reject(new Halted());
       else if (code === 0 || allowFailure) resolve({ code, output });
-      else reject(failure(command, args, code ?? signal, output));
+      else reject(failure(command, args, code ?? by, output));
     });
   });
 }

@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process';
 import { createWriteStream } from 'node:fs';
 import path from 'node:path';
+import { signal } from './processes.mjs';
 import { Halted } from './run.mjs';
 import { Stop } from './say.mjs';
 import { root } from './sources.mjs';
@@ -33,7 +34,7 @@ export function launchApp({ mode, port, host, env, log }) {
   };
   child.stdout.on('data', take(process.stdout));
   child.stderr.on('data', take(process.stderr));
-  const ended = new Promise((resolve) => child.on('exit', (code, signal) => resolve(code ?? signal)));
+  const ended = new Promise((resolve) => child.on('exit', (code, by) => resolve(code ?? by)));
   let over = false;
   void ended.then(() => (over = true));
   return {
@@ -54,20 +55,12 @@ export function launchApp({ mode, port, host, env, log }) {
     },
     async stop() {
       if (over) return;
-      signalGroup(child, 'SIGTERM');
+      signal(-child.pid, 'SIGTERM');
       const late = pause(10_000).then(() => 'late');
-      if ((await Promise.race([ended, late])) === 'late') signalGroup(child, 'SIGKILL');
+      if ((await Promise.race([ended, late])) === 'late') signal(-child.pid, 'SIGKILL');
       await ended;
     },
   };
-}
-
-function signalGroup(child, signal) {
-  try {
-    process.kill(-child.pid, signal);
-  } catch {
-    // It ended by itself in the meantime.
-  }
 }
 
 async function answers({ port, host, token }) {
