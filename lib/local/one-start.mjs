@@ -10,12 +10,12 @@ export const MARK = 'CELLARSUN_STARTED_FROM';
 const pause = (ms) => new Promise((resolve) => setTimeout(resolve, ms));
 
 /** Takes the checkout for this start. Refuses when another start of it still runs. */
-export function takeTurn(stateFolder) {
+export function takeTurn(stateFolder, what = 'Cellarsun is running') {
   const file = path.join(stateFolder, 'running.json');
   const other = recall(file);
   if (other && other.pid !== process.pid && lives(other)) {
     const where = other.address ? ` at ${other.address}` : '';
-    throw new Stop(`Cellarsun is running already${where} (process ${other.pid}). Stop that one first, or use it.`);
+    throw new Stop(`${what} already${where} (process ${other.pid}). Stop that one first, or use it.`);
   }
   const mine = whoAmI();
   remember(file, mine);
