@@ -28,3 +28,11 @@ export function toldMonth(airTempC: Series, evaluation: Pick<Evaluation, 'year'>
   const totals = evaluation.year.months.map((month) => month.energyKwh.total);
   return { month: Math.max(0, totals.indexOf(Math.max(...totals))) + 1, because: 'dearest' };
 }
+
+export const DAYS_IN_MONTH: readonly number[] = DAYS;
+
+/** A series' mean in a month (1 to 12). */
+export function monthMean(series: Series, month: number): number {
+  if (series.kind === 'constant') return series.value;
+  return monthlyMeans(series)?.[month - 1] ?? Number.NaN;
+}

@@ -1,15 +1,16 @@
 /** Where a lamp hangs, in the words of the person who hangs it: above the leaves, from a wall, swung by so much. */
 import type { Vec3 } from '@/physics/light/light-documents';
+import { defaults } from '@/physics/plan/defaults';
 import type { FixtureType, Placement, Tier } from '@/physics/plan/scenario-document';
 
 export type View = 'front' | 'side';
 export type RackTier = Omit<Tier, 'target'>;
 export type LampBody = Pick<FixtureType, 'id' | 'shape' | 'lengthM' | 'widthM' | 'housingThicknessM'>;
 
-/** Leaves stand this far above a tier's top where the plan does not say. */
-export const CANOPY_HEIGHT_DEFAULT_M = 0.15;
-export const TIER_THICKNESS_DEFAULT_M = 0.03;
-export const HOUSING_THICKNESS_DEFAULT_M = 0.03;
+/** What the evaluation takes where the plan does not say; the drawing stands on the same. */
+const CANOPY_HEIGHT_M = defaults['tier.canopyHeightM'].value;
+const TIER_THICKNESS_M = defaults['tier.thicknessM'].value;
+const HOUSING_THICKNESS_M = defaults['fixture.housingThicknessM'].value;
 /** A lamp swung further than this shines at the wall; the drawing stops there. */
 export const TILT_LIMIT_DEG = 80;
 
@@ -17,7 +18,7 @@ const degrees = (radians: number) => (radians * 180) / Math.PI;
 const radians = (deg: number) => (deg * Math.PI) / 180;
 
 export function canopyHeightM(tier: Pick<Tier, 'canopyHeightM'>): number {
-  return tier.canopyHeightM ?? CANOPY_HEIGHT_DEFAULT_M;
+  return tier.canopyHeightM ?? CANOPY_HEIGHT_M;
 }
 
 export function leafHeightM(tier: Pick<Tier, 'topHeightM' | 'canopyHeightM'>): number {
@@ -25,7 +26,7 @@ export function leafHeightM(tier: Pick<Tier, 'topHeightM' | 'canopyHeightM'>): n
 }
 
 export function tierBottomM(tier: Pick<Tier, 'topHeightM' | 'thicknessM' | 'openFrac'>): number {
-  return tier.topHeightM - ((tier.openFrac ?? 0) > 0 ? 0 : (tier.thicknessM ?? TIER_THICKNESS_DEFAULT_M));
+  return tier.topHeightM - ((tier.openFrac ?? 0) > 0 ? 0 : (tier.thicknessM ?? TIER_THICKNESS_M));
 }
 
 /** The tier a lamp serves: the one it names, else the highest one below it. */
@@ -77,7 +78,7 @@ export function lampCorners(lamp: Placement, body: LampBody): Vec3[] {
   const point = body.shape === 'point';
   const halfLength = (point ? 0.06 : (body.lengthM ?? 0.1)) / 2;
   const halfWidth = (point ? 0.06 : (body.widthM ?? 0.1)) / 2;
-  const depth = point ? 0.06 : (body.housingThicknessM ?? HOUSING_THICKNESS_DEFAULT_M);
+  const depth = point ? 0.06 : (body.housingThicknessM ?? HOUSING_THICKNESS_M);
   const corner = (a: number, w: number, back: number): Vec3 =>
     [0, 1, 2].map((i) => lamp.positionM[i]! + a * axis[i]! + w * side[i]! - back * aim[i]!) as unknown as Vec3;
   const face: Vec3[] = [];

@@ -5,7 +5,7 @@
 import type { Evaluation } from '@/physics/plan/evaluation-document';
 import type { ScenarioDocument, Target } from '@/physics/plan/scenario-document';
 import { setLampAboveLeaves, setLampOutput, setLampSchedule, type EditablePlan } from './edit-plan';
-import { aboveLeavesM, servedTier } from './lamp-pose';
+import { aboveLeavesM, servedTier, tierBottomM } from './lamp-pose';
 import { toldMonth } from './coldest-month';
 
 export interface WayOut {
@@ -113,7 +113,9 @@ function byHeight(at: Case, rest: Change = {}): WayOut | null {
 function freeAboveM({ doc, lamps }: Case): number {
   const heights = doc.placements.filter((lamp) => lamps.includes(lamp.id)).map((lamp) => lamp.positionM[2]);
   const lampM = Math.max(...heights);
-  const above = doc.tiers.map((tier) => tier.topHeightM - (tier.thicknessM ?? 0.03)).filter((bottom) => bottom > lampM);
+  const above = doc.tiers
+    .map((tier) => tier.topHeightM - (tier.topHeightM - tierBottomM(tier)))
+    .filter((bottom) => bottom > lampM);
   return Math.min(doc.tent.heightM, ...above) - lampM - 0.08;
 }
 

@@ -36,8 +36,15 @@ export const BLOCK_GAP_PX = 12;
 /** Shifted further than this, a leader would be a long slant: it is left out. */
 const LONGEST_SHIFT_PX = 190;
 
-export function columnNeedPx(blocks: readonly NoteBlock[], heights: BlockHeights): number {
-  return blocks.reduce((sum, block) => sum + (heights[block.id] ?? block.estimatePx) + BLOCK_GAP_PX, 0);
+const LEFT_BLOCK = /^(lamp-|inspector|heater|clash)/;
+
+/** How tall the fuller of the two columns is, as measured. */
+export function columnsNeedPx(heights: BlockHeights): number {
+  const need = (left: boolean) =>
+    Object.entries(heights)
+      .filter(([id]) => LEFT_BLOCK.test(id) === left)
+      .reduce((sum, [, height]) => sum + height + BLOCK_GAP_PX, 0);
+  return Math.max(need(true), need(false));
 }
 
 interface AnnotationColumnProps {

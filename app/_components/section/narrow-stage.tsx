@@ -1,0 +1,215 @@
+'use client';
+
+/** The section on a tablet or a phone: the tent first, its things keyed by letters to ruled rows, the bill at the foot. */
+import { useId, useMemo, useRef, type ReactNode } from 'react';
+import { ExplainSheet } from '../explain';
+import { CautionMark, CautionsList } from './cautions-list';
+import { DimensionPart } from './dimension-part';
+import { HeaterWords } from './heat-notes';
+import { Inspector } from './inspector';
+import { KeyLetters, keyLetters, type KeyLetter } from './key-letters';
+import { isSelected } from './plan-edit';
+import { fanNote, TierNote, waterNote } from './plant-notes';
+import { RoomLines, SLAB_PX } from './room-lines';
+import { AddWords, AirNote, CircuitWords } from './room-notes';
+import { BillWords, billOf, LedgerKey, LedgerWords } from './section-foot';
+import type { SectionContext } from './section-context';
+import { sectionFrame } from './section-frame';
+import { SectionPicture } from './section-picture';
+import type { StageProps } from './section-stage';
+import { StepperRow } from './stepper-row';
+import { useOpenFields } from './use-open-fields';
+import { useSection } from './use-section';
+import { ViewChoice } from './view-choice';
+import { MONTHS } from './year-ledger';
+
+interface NarrowStageProps extends StageProps {
+  widthPx: number;
+  view: 'front' | 'side';
+  left?: ReactNode;
+}
+
+export function NarrowStage(props: NarrowStageProps) {
+  const { widthPx, view, chooseView, input, state, left, footEnd, explaining } = props;
+  const root = useRef<HTMLDivElement>(null);
+  const openFields = useOpenFields(root);
+  const hatchId = `${useId()}room`;
+  const tablet = widthPx >= 700;
+  const paperPx = tablet ? Math.round(widthPx * 0.52) : widthPx;
+  const { widthM, depthM, heightM } = input.doc.tent;
+  const floorPx = tablet ? 592 : 444;
+  const frame = useMemo(
+    () =>
+      sectionFrame({ widthM, depthM, heightM }, view, {
+        maxWidthPx: Math.min(paperPx - 112, tablet ? 355 : 300),
+        maxHeightPx: tablet ? 533 : 416,
+        centrePx: paperPx / 2,
+        floorPx,
+      }),
+    [widthM, depthM, heightM, view, paperPx, tablet, floorPx],
+  );
+  const { context, drag } = useSection(input, state, frame);
+  const letters = keyLetters(context);
+  const empty = context.doc.placements.length === 0 && !context.selection;
+  const picture = (
+    <div className="relative" style={{ width: paperPx }}>
+      <svg
+        width={paperPx}
+        height={floorPx + SLAB_PX}
+        role="group"
+        aria-label={`${context.doc.name}, cut open, ${view}`}
+        className="block select-none"
+      >
+        <RoomLines widthPx={paperPx} floorPx={floorPx} hatchId={hatchId} walls={false} />
+        {tablet && (
+          <DimensionPart
+            model={context.model}
+            text={(metres) => context.words.say(metres, 'length')}
+            widthNote={context.words.say(frame.acrossM, 'length')}
+          />
+        )}
+        <SectionPicture
+          context={context}
+          drag={drag}
+          openFields={openFields}
+          stripsBefore={props.stripsBefore(context)}
+          labelPx={12}
+        />
+        <KeyLetters letters={letters} paperPx={paperPx} />
+      </svg>
+    </div>
+  );
+  const rows = (
+    <div className="flex flex-col">
+      {left}
+      {empty && props.firstVisit?.(context)}
+      {context.slots.clash}
+      <StepperRow context={context} letters={letters} />
+      <Rows context={context} letters={letters} />
+      <div className="border-b border-line py-3">
+        <AirNote context={context} />
+      </div>
+      <div className="border-b border-line py-3">
+        <AddWords context={context} />
+      </div>
+    </div>
+  );
+  return (
+    <div ref={root}>
+      <div
+        className={tablet ? 'grid gap-6 pr-6' : ''}
+        style={tablet ? { gridTemplateColumns: `${paperPx}px minmax(0, 1fr)` } : undefined}
+      >
+        {picture}
+        <div className={tablet ? 'pt-3' : 'px-4 pt-2'}>
+          <ViewChoice view={view} choose={chooseView} quiet />
+          {explaining ? <ExplainSheet /> : rows}
+        </div>
+      </div>
+      <div className={`grid gap-4 py-4 ${tablet ? 'grid-cols-2 px-6' : 'px-4'}`}>
+        <BillWords context={context} />
+        <div>
+          <LedgerWords context={context} widthPx={Math.min(360, widthPx - 32)} heightPx={110} />
+          <LedgerKey context={context} row />
+        </div>
+        <CircuitWords context={context} />
+        <div id="cautions">{footEnd ?? <CautionsList context={context} most={6} />}</div>
+      </div>
+      {!tablet && <TotalsBar context={context} />}
+    </div>
+  );
+}
+
+function Letter({ letters, id, selected }: { letters: readonly KeyLetter[]; id: string; selected: boolean }) {
+  const letter = letters.find((each) => each.id === id)?.letter;
+  if (!letter) return <span className="w-[22px] flex-none" />;
+  return (
+    <span
+      aria-hidden="true"
+      className={`grid h-[22px] w-[22px] flex-none place-items-center rounded-full border text-12 font-semibold ${selected ? 'border-chip bg-chip text-on-chip' : 'border-ink'}`}
+    >
+      {letter}
+    </span>
+  );
+}
+
+/** A row for each thing: the tier that most wants a person first. */
+function Rows({ context, letters }: { context: SectionContext; letters: readonly KeyLetter[] }) {
+  const { model, worst, selection, select, words } = context;
+  const tiers = [...model.tiers].sort((a, b) => Number(b.tier.id === worst) - Number(a.tier.id === worst));
+  const row = (id: string, selected: boolean, node: ReactNode, inspect: boolean) => (
+    <li key={id} className="flex gap-2.5 border-b border-line py-2.5">
+      <Letter letters={letters} id={id} selected={selected} />
+      <div className="min-w-0 flex-1">
+        {node}
+        {inspect && (
+          <div className="mt-2">
+            <Inspector context={context} />
+          </div>
+        )}
+      </div>
+    </li>
+  );
+  const fan = fanNote(context)[0];
+  const water = waterNote(context)[0];
+  const free = selection && (selection.kind === 'climate' || selection.kind === 'tent');
+  return (
+    <ul>
+      {tiers.map((tier) => {
+        const chosen = isSelected(selection, 'tier', tier.tier.id);
+        const verdict = context.verdicts.get(tier.tier.id);
+        return row(
+          `tier-${tier.tier.id}`,
+          chosen,
+          <TierNote context={context} tier={tier} verdict={verdict} compact />,
+          chosen,
+        );
+      })}
+      {model.groups.map((group) => {
+        const chosen = selection?.kind === 'lamp' && group.lamps.some((lamp) => lamp.id === selection.id);
+        return row(
+          `lamp-${group.id}`,
+          chosen,
+          chosen ? null : (
+            <button
+              type="button"
+              className="min-h-6 cursor-pointer text-left"
+              onClick={() => select({ kind: 'lamp', id: group.lamps[0]!.id })}
+            >
+              <span className="font-semibold">{words.group(group)}</span>
+              <span className="block text-12 text-ink-soft">{words.groupFacts(group)}</span>
+            </button>
+          ),
+          chosen,
+        );
+      })}
+      {context.doc.climate.heater &&
+        row(
+          'heater',
+          isSelected(selection, 'heater'),
+          isSelected(selection, 'heater') ? null : <HeaterWords context={context} />,
+          isSelected(selection, 'heater'),
+        )}
+      {fan && row('fan', isSelected(selection, 'fan'), fan.node, isSelected(selection, 'fan'))}
+      {water && row('water', isSelected(selection, 'water'), water.node, isSelected(selection, 'water'))}
+      {free && row('free', true, null, true)}
+    </ul>
+  );
+}
+
+function TotalsBar({ context }: { context: SectionContext }) {
+  const bill = billOf(context);
+  const cautions = context.evaluation?.cautions.length ?? 0;
+  return (
+    <div className="sticky bottom-0 z-10 flex min-h-[58px] items-center justify-between border-t-[1.5px] border-ink bg-sheet px-4 py-1.5">
+      <p className="text-14 text-ink-soft">
+        <span className="text-22 font-semibold text-ink">{bill ? bill.kwh.toFixed(0) : '0'}</span> kWh{' '}
+        {bill ? `in ${MONTHS[bill.month - 1]}` : 'a month'}
+      </p>
+      <a href="#cautions" className="flex min-h-11 items-center gap-2 text-14 font-semibold">
+        {cautions > 0 && <CautionMark />}
+        {cautions === 0 ? 'No cautions' : cautions === 1 ? '1 caution' : `${cautions} cautions`}
+      </a>
+    </div>
+  );
+}

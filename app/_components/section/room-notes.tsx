@@ -1,0 +1,139 @@
+'use client';
+
+/** What stands beside the tent in the room: its air, what may be added, the circuits, the key of the drawing. */
+import { useState } from 'react';
+import { addLamp, freshId } from '@/lib/scenarios/edit-plan';
+import { addTier } from '@/lib/scenarios/edit-rack';
+import { placeForLamp } from '@/lib/scenarios/lamp-range';
+import { monthMean } from '@/lib/scenarios/coldest-month';
+import { Explainable } from '../explain';
+import { Num } from '../num';
+import { Verb } from './inspector';
+import type { SectionContext } from './section-context';
+import { MONTHS } from './year-ledger';
+
+const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left';
+
+export function AirNote({ context }: { context: SectionContext }) {
+  const { doc, told, words, select } = context;
+  const month = told?.month ?? 1;
+  const humidity = doc.room.relHumidityPct;
+  const { dayTempC, nightTempC } = doc.climate;
+  return (
+    <div className="flex gap-2">
+      <svg width="12" height="38" viewBox="0 0 12 38" aria-hidden="true" className="mt-0.5 flex-none">
+        <path d="M4 26V4a2 2 0 0 1 4 0v22" fill="none" stroke="var(--ink)" strokeWidth="1.2" />
+        <path d="M6 30V16" stroke="var(--frost)" strokeWidth="2.4" />
+        <circle cx="6" cy="31" r="5" fill="var(--frost)" stroke="var(--ink)" strokeWidth="1.2" />
+      </svg>
+      <div>
+        <p className="text-12 text-ink-soft">Room air, {MONTHS[month - 1]}</p>
+        <p className="text-17 text-ink-soft">
+          <span className="font-semibold text-ink">
+            {words.say(monthMean(doc.room.airTempC, month), 'temperature')}
+          </span>
+          {humidity && <span className="ml-3">{words.say(monthMean(humidity, month), 'relHumidity')}</span>}
+        </p>
+        <p className="text-12">
+          <button type="button" className={dotted} onClick={() => select({ kind: 'climate' })}>
+            Held at {words.say(dayTempC, 'temperature')} by day, {words.say(nightTempC, 'temperature')} by night
+          </button>
+        </p>
+      </div>
+    </div>
+  );
+}
+
+export function AddWords({ context }: { context: SectionContext }) {
+  const { doc, edit, select, worst, slots } = context;
+  const [choosing, setChoosing] = useState(false);
+  if (edit.readOnly !== null) return <p className="text-12 text-ink-soft">{edit.readOnly}</p>;
+  const tierId = context.selection?.kind === 'tier' ? context.selection.id : (worst ?? doc.tiers[0]?.id ?? null);
+  const hang = (fixture: string) => {
+    const positionM = placeForLamp(doc, tierId ?? '');
+    const id = freshId('lamp', doc.placements);
+    edit.apply((plan) => addLamp(plan, { fixture, tier: tierId, positionM }).plan, `add ${id}`);
+    select({ kind: 'lamp', id });
+    setChoosing(false);
+  };
+  return (
+    <div>
+      <div className="flex flex-wrap gap-x-5 gap-y-1">
+        <Verb onClick={() => (doc.fixtures.length === 1 ? hang(doc.fixtures[0]!.id) : setChoosing(!choosing))}>
+          Hang a lamp
+        </Verb>
+        <Verb
+          onClick={() => {
+            const id = freshId('tier', doc.tiers);
+            edit.apply((plan) => addTier(plan, doc.tent).plan, `add ${id}`);
+            select({ kind: 'tier', id });
+          }}
+        >
+          Put in a shelf
+        </Verb>
+        {!doc.climate.heater && <Verb onClick={() => select({ kind: 'heater' })}>A heater</Verb>}
+        {!doc.climate.exhaust && <Verb onClick={() => select({ kind: 'fan' })}>A fan</Verb>}
+        {!doc.water && <Verb onClick={() => select({ kind: 'water' })}>Water</Verb>}
+        <button type="button" className={`${dotted} text-12 text-ink-soft`} onClick={() => select({ kind: 'tent' })}>
+          The tent itself
+        </button>
+      </div>
+      {choosing && (
+        <ul className="mt-1 border-l-[3px] border-lamp pl-3 text-14" aria-label="Which lamp">
+          {doc.fixtures.map((fixture) => (
+            <li key={fixture.id}>
+              <button type="button" className={`${dotted} py-0.5`} onClick={() => hang(fixture.id)}>
+                {fixture.name ?? 'Lamp'}
+              </button>{' '}
+              <span className="text-12 text-ink-soft">
+                {context.words.say(fixture.inputPowerW, 'power')}, {context.words.say(fixture.ppfUmolS, 'ppf', 0)}
+              </span>
+            </li>
+          ))}
+          {doc.fixtures.length === 0 && <li className="text-12 text-ink-soft">This garden has no lamps yet.</li>}
+          {slots.fixturesLink && <li className="text-12">{slots.fixturesLink}</li>}
+        </ul>
+      )}
+    </div>
+  );
+}
+
+/** The circuits: what they carry of what they may carry for hours on end. */
+export function CircuitWords({ context }: { context: SectionContext }) {
+  const { evaluation, doc } = context;
+  const names = context.slots.circuitNames;
+  return (
+    <ul className="text-right text-12 text-ink-soft">
+      {(evaluation?.circuits ?? []).map((circuit) => {
+        const rating = doc.power.circuits.find((each) => each.id === circuit.id)?.ratingA ?? 0;
+        return (
+          <li key={circuit.id}>
+            <span className="font-semibold text-slate">
+              {names?.[circuit.id] ?? 'Circuit'}, {rating} A
+            </span>
+            :{' '}
+            <Explainable path={`circuits.${circuit.id}.continuous`}>
+              <Num text={circuit.continuousA.toFixed(1)} />
+            </Explainable>{' '}
+            of {circuit.limitA.toFixed(1)} A for hours on end
+            {circuit.within ? '' : <span className="font-semibold text-ember-ink">, too much</span>}
+          </li>
+        );
+      })}
+    </ul>
+  );
+}
+
+export function DrawingKey({ bar }: { bar: boolean }) {
+  return (
+    <div className="text-12 text-ink-soft">
+      <p>Light on a level leaf, µmol/m²/s.</p>
+      <p>Brackets: what a crop wants in its hours.</p>
+      <p className="mt-1 flex items-center gap-2">
+        <span className="inline-block h-2.5 w-[26px] flex-none bg-ember" aria-hidden="true" />
+        this wide is 100 W of heat: full comes in, open goes out
+      </p>
+      {bar && <p className="mt-1">The bar under a shelf: light on its leaves from wall to wall.</p>}
+    </div>
+  );
+}

@@ -1,0 +1,199 @@
+'use client';
+
+/** The section on a wide page: the tent in the middle, what burns at its left, what grows at its right, the bill below. */
+import { useId, useMemo, useRef, type ReactNode } from 'react';
+import { ExplainSheet } from '../explain';
+import { AnnotationColumn, columnsNeedPx, type NoteBlock } from './annotation-column';
+import { CautionsList } from './cautions-list';
+import { DimensionPart } from './dimension-part';
+import { heaterNote, lampNotes, otherInspector } from './heat-notes';
+import { Inspector } from './inspector';
+import { LegendPart } from './legend-part';
+import { fanNote, tierNotes, waterNote } from './plant-notes';
+import { RoomLines, SLAB_PX } from './room-lines';
+import { AddWords, AirNote, CircuitWords, DrawingKey } from './room-notes';
+import { BillWords, LedgerKey, LedgerWords } from './section-foot';
+import { sectionFrame, sectionPxPerM } from './section-frame';
+import { SectionPicture } from './section-picture';
+import type { StageProps } from './section-stage';
+import { legendBrackets } from './section-words';
+import { useBlockHeights } from './use-block-heights';
+import { useOpenFields } from './use-open-fields';
+import { useSection } from './use-section';
+import { ViewChoice } from './view-choice';
+
+const FLOOR_PX = 722;
+const TENT = { maxWidthPx: 420, maxHeightPx: 620 };
+const COLUMN_TOP_PX = 150;
+
+interface WideStageProps extends StageProps {
+  widthPx: number;
+  view: 'front' | 'side';
+  /** In place of the left column: the landing page's own words. */
+  left?: ReactNode;
+}
+
+export function WideStage(props: WideStageProps) {
+  const { widthPx, view, chooseView, input, state, left, footEnd, explaining } = props;
+  const root = useRef<HTMLDivElement>(null);
+  const hatchId = `${useId()}room`;
+  const heights = useBlockHeights(root);
+  const openFields = useOpenFields(root);
+  const { doc } = input;
+  const centre = widthPx / 2;
+  const leftX = Math.max(44, centre - 676);
+  const leftWidth = centre - 290 - leftX;
+  const rightX = centre + 264;
+  const rightWidth = Math.min(412, widthPx - 44 - rightX);
+  const circuits = input.evaluation?.circuits.length ?? 0;
+  // A first frame at the usual floor tells what the columns need; a fuller column lowers the floor.
+  const floorPx =
+    FLOOR_PX + Math.max(0, Math.ceil(columnsNeedPx(heights) - (FLOOR_PX - COLUMN_TOP_PX - 20 - circuits * 18)));
+  const { widthM, depthM, heightM } = doc.tent;
+  const frame = useMemo(
+    () => sectionFrame({ widthM, depthM, heightM }, view, { ...TENT, centrePx: centre, floorPx }),
+    [widthM, depthM, heightM, view, centre, floorPx],
+  );
+  const { context, drag } = useSection(input, state, frame);
+  const { model, words } = context;
+  const small = sectionPxPerM(doc.tent, TENT) < 200;
+  const empty = doc.placements.length === 0;
+  const leftBlocks: NoteBlock[] = left
+    ? []
+    : context.slots.clash
+      ? [
+          { id: 'clash', node: <Inspector context={context} />, estimatePx: 320, wantedTopPx: 200, toPx: null },
+          ...heaterNote(context),
+        ]
+      : [...lampNotes(context, leftX), ...otherInspector(context), ...heaterNote(context)];
+  const rightBlocks = [...fanNote(context), ...tierNotes(context), ...waterNote(context)];
+  const width = `${words.say(frame.acrossM, 'length')}${view === 'side' ? ' deep' : ''}`;
+  const over = Math.max(0, ...(input.evaluation?.tiers ?? []).map((tier) => tier.ppfdUmolM2S.max)) > 800;
+  const indented = rightBlocks.map((block) =>
+    block.id === 'fan' && view === 'front' ? { ...block, node: <div className="pl-10">{block.node}</div> } : block,
+  );
+  return (
+    <div ref={root} className="relative overflow-x-clip" style={{ paddingTop: floorPx + SLAB_PX }}>
+      <svg
+        className="absolute inset-x-0 top-0 select-none"
+        width={widthPx}
+        height={floorPx + SLAB_PX}
+        role="group"
+        aria-label={`${doc.name}, cut open, ${view}`}
+      >
+        <RoomLines widthPx={widthPx} floorPx={floorPx} hatchId={hatchId} walls />
+        <LegendPart
+          x0={centre - 204}
+          x1={centre + 204}
+          y={51}
+          brackets={legendBrackets(model, context.verdicts)}
+          over={over}
+        />
+        <DimensionPart model={model} text={(metres) => words.say(metres, 'length')} widthNote={width} />
+        <SectionPicture
+          context={context}
+          drag={drag}
+          openFields={openFields}
+          stripsBefore={props.stripsBefore(context)}
+        />
+        {view === 'side' && (
+          <g fontSize={12} fill="var(--ink-soft)">
+            <text x={frame.leftPx - 30} y={floorPx - 6} textAnchor="end">
+              door
+            </text>
+            <text x={frame.leftPx + frame.acrossM * frame.pxPerM + 12} y={floorPx - 6}>
+              back
+            </text>
+          </g>
+        )}
+      </svg>
+      {left ? (
+        <div className="absolute" style={{ left: leftX, width: leftWidth, top: 40, height: floorPx - 48 }}>
+          {left}
+        </div>
+      ) : (
+        <>
+          <div className="absolute" style={{ left: leftX - 20, width: leftWidth + 20, top: 26 }}>
+            <AirNote context={context} />
+            <div className="mt-2 pl-5">
+              <AddWords context={context} />
+            </div>
+          </div>
+          {empty && !context.selection ? (
+            <div className="absolute" style={{ left: leftX, width: leftWidth, top: 210 }}>
+              {props.firstVisit?.(context)}
+            </div>
+          ) : (
+            <AnnotationColumn
+              blocks={leftBlocks}
+              heights={heights}
+              column={{
+                side: 'left',
+                xPx: leftX,
+                widthPx: leftWidth,
+                topPx: COLUMN_TOP_PX,
+                bottomPx: floorPx - 12,
+                bendPx: Math.min(frame.leftPx - 50, centre - 262),
+              }}
+            />
+          )}
+        </>
+      )}
+      <div className="absolute" style={{ left: rightX, width: rightWidth, top: 20 }}>
+        <div className="flex justify-end">
+          <ViewChoice view={view} choose={chooseView} />
+        </div>
+        <div className="-mt-1 pr-2">
+          <DrawingKey bar={small} />
+        </div>
+      </div>
+      {explaining ? (
+        <div
+          className="absolute z-10 overflow-y-auto"
+          style={{
+            left: rightX - 16,
+            width: rightWidth + 16,
+            top: COLUMN_TOP_PX,
+            maxHeight: floorPx - COLUMN_TOP_PX - 8,
+          }}
+        >
+          <ExplainSheet />
+        </div>
+      ) : (
+        <AnnotationColumn
+          blocks={indented}
+          heights={heights}
+          column={{
+            side: 'right',
+            xPx: rightX,
+            widthPx: rightWidth,
+            topPx: COLUMN_TOP_PX,
+            bottomPx: floorPx - 14 - circuits * 18,
+            bendPx: rightX - 40,
+          }}
+        />
+      )}
+      <div
+        className="absolute"
+        style={{ right: Math.max(24, widthPx - rightX - rightWidth), top: floorPx - 6 - circuits * 18 }}
+      >
+        <CircuitWords context={context} />
+      </div>
+      <div
+        className="grid gap-x-4 pt-3 pb-6"
+        style={{
+          paddingLeft: leftX - 12,
+          gridTemplateColumns: `${centre - 204 - leftX - 4}px 408px 140px minmax(0, 1fr)`,
+          paddingRight: 24,
+        }}
+      >
+        <BillWords context={context} />
+        <LedgerWords context={context} widthPx={408} heightPx={90} />
+        <div className="pt-2">
+          <LedgerKey context={context} />
+        </div>
+        <div>{footEnd ?? <CautionsList context={context} />}</div>
+      </div>
+    </div>
+  );
+}
