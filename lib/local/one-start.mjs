@@ -44,7 +44,7 @@ function leftovers(mark) {
 export async function endLeftovers(mark) {
   const found = leftovers(mark);
   for (const pid of found) signal(pid, 'SIGTERM');
-  const until = Date.now() + 8_000;
+  const until = Date.now() + 3_000;
   while (leftovers(mark).length > 0 && Date.now() < until) await pause(100);
   for (const pid of leftovers(mark)) signal(pid, 'SIGKILL');
   while (leftovers(mark).length > 0) await pause(50);

@@ -1,13 +1,16 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { run } from './run.mjs';
+import { Stop } from './say.mjs';
 import { DATABASE_INPUTS, hashOf, root } from './sources.mjs';
 import { recall, remember } from './state-file.mjs';
 
 /** The one extra process that understands TypeScript: migrations, the check of the reference data, the demo. */
 export async function prepareDatabase({ env, demo }) {
   const args = ['--import', 'tsx', '--import', './lib/local/server-only.mjs', 'lib/local/prepare.ts'];
-  const { output } = await run(process.execPath, [...args, ...(demo ? ['--demo'] : [])], { cwd: root, env });
+  const options = { cwd: root, env, allowFailure: true };
+  const { code, output } = await run(process.execPath, [...args, ...(demo ? ['--demo'] : [])], options);
+  if (code !== 0) throw new Stop(`The database could not be prepared:\n\n${output.trim()}`);
   return output.trim().split('\n').filter(Boolean);
 }
 

@@ -44,7 +44,10 @@ export function launchApp({ mode, port, host, env, log }) {
       const until = Date.now() + seconds * 1000;
       while (Date.now() < until) {
         if (isHalted()) throw new Halted();
-        if (over) throw new Stop(`The app ended before it was ready. It said:\n\n${early}`);
+        // A refusal at boot leaves the process there, answering nothing.
+        if (over || early.includes('Failed to prepare server')) {
+          throw new Stop(`The app did not come up. It said:\n\n${early}`);
+        }
         if (await answers({ port, host, token })) {
           shown = true;
           return;

@@ -117,7 +117,7 @@ async function main() {
   } catch (error) {
     if (!(error instanceof Halted)) {
       code = 1;
-      process.stderr.write(`\n${error instanceof Stop ? error.message : error.stack}\n`);
+      process.stderr.write(`\n${error instanceof Stop || error.output ? error.message : error.stack}\n`);
     }
   }
   halting = true;
@@ -128,6 +128,6 @@ async function main() {
 }
 
 main().catch((error) => {
-  process.stderr.write(`\n${error instanceof Stop ? error.message : error.stack}\n`);
+  process.stderr.write(`\n${error instanceof Stop || error.output ? error.message : error.stack}\n`);
   process.exit(1);
 });

@@ -146,7 +146,7 @@ async function main() {
   try {
     await everything();
   } catch (error) {
-    const output = error instanceof Halted || error instanceof Stop ? error.message : error.stack;
+    const output = error instanceof Halted || error instanceof Stop || error.output ? error.message : error.stack;
     failures.push({ name: 'The tests themselves', output });
     total.failed += 1;
   }
