@@ -1,0 +1,110 @@
+import type { Caution } from './evaluation-document';
+import { rounded, type CautionFacts } from './cautions';
+import { sources } from '../sources';
+
+/** Asked for where the maker's label is not known, m. @source NFPA, 3 ft on every side */
+export const USUAL_CLEARANCE_M = 1;
+
+const cm = (metres: number) => `${rounded(metres * 100)} cm`;
+
+function clearance({ scenario }: CautionFacts): Caution[] {
+  const heater = scenario.climate.heater!;
+  const asked = heater.clearanceM ?? USUAL_CLEARANCE_M;
+  const label =
+    heater.clearanceM === undefined || heater.clearanceM === null
+      ? 'its label is not known, so the usual 1 m (3 ft) is asked for'
+      : `its maker's label asks for ${cm(heater.clearanceM)}; without a label 1 m (3 ft) is asked for`;
+  const { widthM, depthM } = scenario.tent;
+  const inside = heater.placeM !== undefined;
+  const place = heater.placeM;
+  const nearest = place ? Math.min(place[0], widthM - place[0], place[1], depthM - place[1]) : null;
+  if (inside && nearest !== null && nearest < asked) {
+    const tooNarrow = Math.min(widthM, depthM) < 2 * asked;
+    return [
+      {
+        code: 'heater.clearance',
+        severity: 'danger',
+        where: 'climate.heater',
+        text: `The heater stands ${cm(Math.max(0, nearest))} from the fabric; ${label}. ${tooNarrow ? 'This tent is too narrow for that anywhere: warm the room, or the air that is drawn in, before you heat inside.' : 'Move it, or warm the room or the air that is drawn in.'} The maker's instructions decide.`,
+        source: sources.NFPA_HEATER.citation,
+      },
+    ];
+  }
+  return [
+    {
+      code: 'heater.clearance',
+      severity: 'warning',
+      where: 'climate.heater',
+      text: `Keep ${cm(asked)} free on every side of the heater, tent and plants included; ${label}. ${Math.min(widthM, depthM) < 2 * asked ? 'Inside this tent there is no such place: stand it outside and warm the room or the air that is drawn in.' : ''} The maker's instructions decide.`.replace(
+        '  ',
+        ' ',
+      ),
+      source: sources.NFPA_HEATER.citation,
+    },
+  ];
+}
+
+function sizing({ scenario, heat }: CautionFacts): Caution[] {
+  const ratedW = scenario.climate.heater?.ratedPowerW ?? 0;
+  const needW = Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW);
+  if (needW > ratedW + 0.5) {
+    return [
+      {
+        code: 'heater.short',
+        severity: 'warning',
+        where: 'climate.heater',
+        text: `In the coldest hours ${rounded(needW - ratedW)} W are missing: ${ratedW > 0 ? `the heater gives ${rounded(ratedW)} of ${rounded(needW)} W` : `no heater is planned and ${rounded(needW)} W are needed`}. Insulating the tent or warming the room may be safer than a bigger heater.`,
+        source: 'Computed from the coldest room temperature',
+      },
+    ];
+  }
+  if (needW > 0 && ratedW > 2 * needW) {
+    return [
+      {
+        code: 'heater.oversize',
+        severity: 'note',
+        where: 'climate.heater',
+        text: `The heater is ${rounded(ratedW / needW, 1)} times what the coldest night needs. It will switch often; a smaller one holds steadier and loads the circuit less.`,
+        source: 'Judged',
+      },
+    ];
+  }
+  return [];
+}
+
+/** A portable heater in or beside a fabric tent: what fire services and makers ask. */
+export function heaterCautions(facts: CautionFacts): Caution[] {
+  const { scenario, heat } = facts;
+  const heater = scenario.climate.heater;
+  if (!heater || heater.ratedPowerW === 0) return sizing(facts);
+  const nights = heat.coldDark.heaterW > 0;
+  return [
+    ...clearance(facts),
+    ...sizing(facts),
+    ...(nights
+      ? [
+          {
+            code: 'heater.unattended',
+            severity: 'warning',
+            where: 'climate.heater',
+            text: 'This plan heats through the night. A portable heater is meant to be watched and to be off while you sleep or are out; for heat round the clock take equipment that is listed and installed for it, with over-heat and tip-over cut-out and a thermostat.',
+            source: `${sources.NFPA_HEATER.citation}; ${sources.CPSC_HEATER.citation}`,
+          } satisfies Caution,
+        ]
+      : []),
+    {
+      code: 'heater.socket',
+      severity: 'warning',
+      where: 'climate.heater',
+      text: 'Plug the heater straight into a wall socket that nothing else uses: no extension lead, no power strip, no timer or smart plug that is not rated for it. A warm plug means stop.',
+      source: `${sources.NFPA_HEATER.citation}; ${sources.CPSC_HEATER.citation}`,
+    },
+    {
+      code: 'heater.alarm',
+      severity: 'note',
+      where: 'room',
+      text: 'A smoke alarm in the room and a clear way out. Nothing that burns fuel ever goes into a tent.',
+      source: sources.CPSC_HEATER.citation,
+    },
+  ];
+}
