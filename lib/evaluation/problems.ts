@@ -68,7 +68,7 @@ function problemOf(issue: Issue, input: unknown): DocumentProblem[] {
     {
       path: pathText(issue.path),
       value: brief(valueAt(input, issue.path)),
-      range: expected?.range ?? 'see message',
+      range: expected?.range ?? (missing ? 'must be there' : 'see message'),
       unit: expected?.unit ?? '',
       message:
         missing && !expected

@@ -5,8 +5,8 @@ import { add, scale } from './vector';
 import { viewFactor } from './view-factor';
 
 /** Parts of a face that is not Lambertian are at most this share of their distance wide: 0.3 keeps the middle within 0.1 %. */
-const PART_OF_DISTANCE = 0.3;
-const MOST_PARTS = 24;
+const PART_OF_DISTANCE = 0.03;
+const MOST_PARTS = 200;
 
 function pointLight(point: Vec3, normal: Vec3, lamp: Emitter, occluders: readonly Occluder[]): number {
   const x = point[0] - lamp.position[0];
