@@ -6,11 +6,13 @@ interface DimensionPartProps {
   model: SectionModel;
   text: (metres: number) => string;
   widthNote: string;
+  /** No room for the heights beside the tent. */
+  widthOnly?: boolean;
 }
 
 const tick = (x: number, y: number) => `M${px(x - 3.5)} ${px(y + 3.5)}l7 -7`;
 
-export function DimensionPart({ model, text, widthNote }: DimensionPartProps) {
+export function DimensionPart({ model, text, widthNote, widthOnly }: DimensionPartProps) {
   const { tent, frame, tiers } = model;
   const y = tent.y0 - 12;
   const middle = (tent.x0 + tent.x1) / 2;
@@ -23,7 +25,15 @@ export function DimensionPart({ model, text, widthNote }: DimensionPartProps) {
       <text x={px(middle)} y={px(y + 4)} textAnchor="middle" fill="var(--ink)" stroke="none">
         {widthNote}
       </text>
-      <HeightChain frame={frame} tops={tiers.map(({ tier }) => tier.topHeightM)} x={tent.x0 - 19} text={text} />
+      {!widthOnly && (
+        <HeightChain
+          frame={frame}
+          below={model.heater && !model.heater.inside ? model.heater.box.y0 - 6 : Infinity}
+          tops={tiers.map(({ tier }) => tier.topHeightM)}
+          x={tent.x0 - 19}
+          text={text}
+        />
+      )}
     </g>
   );
 }
@@ -32,10 +42,12 @@ interface HeightChainProps {
   frame: SectionFrame;
   tops: readonly number[];
   x: number;
+  /** Figures stand above this; the heater has the place below. */
+  below: number;
   text: (metres: number) => string;
 }
 
-function HeightChain({ frame, tops, x, text }: HeightChainProps) {
+function HeightChain({ frame, tops, x, below, text }: HeightChainProps) {
   const levels = [...new Set([0, ...tops, frame.heightM])].sort((a, b) => a - b);
   const at = (metres: number) => frame.floorPx - metres * frame.pxPerM;
   return (
@@ -48,8 +60,10 @@ function HeightChain({ frame, tops, x, text }: HeightChainProps) {
       ))}
       {levels.slice(1).map((level, i) => {
         const from = levels[i]!;
-        const y = at((level + from) / 2);
-        if ((level - from) * frame.pxPerM < 44) return null;
+        const top = at(level);
+        const bottom = Math.min(at(from), below);
+        if (bottom - top < 44) return null;
+        const y = (top + bottom) / 2;
         return (
           <text
             key={level}

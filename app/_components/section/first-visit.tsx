@@ -10,10 +10,10 @@ import { QuantityField } from '../quantity-field';
 import type { SectionContext } from './section-context';
 
 export function FirstVisit({ context }: { context: SectionContext }) {
-  const { doc, edit, slots } = context;
+  const { doc, edit, slots, fixtures } = context;
   const { tent } = doc;
   const bare = doc.tiers.length === 0;
-  const lamp = doc.fixtures[0];
+  const lamp = fixtures[0];
   const locked = edit.readOnly !== null;
   const start = () => {
     edit.apply((plan) => {
@@ -25,7 +25,7 @@ export function FirstVisit({ context }: { context: SectionContext }) {
       if (!next.water) next = setPump(setWater(next, { reservoirL: 40 }), 20);
       if (lamp)
         for (const tier of next.tiers) {
-          const rack = { tiers: next.tiers, placements: next.placements, fixtures: doc.fixtures, tent };
+          const rack = { tiers: next.tiers, placements: next.placements, fixtures, tent };
           next = addLamp(next, { fixture: lamp.id, tier: tier.id, positionM: placeForLamp(rack, tier.id) }).plan;
         }
       return next;

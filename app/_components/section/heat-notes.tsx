@@ -7,6 +7,7 @@ import type { NoteBlock } from './annotation-column';
 import { Inspector } from './inspector';
 import { isSelected } from './plan-edit';
 import type { SectionContext } from './section-context';
+import { DAYS_IN_MONTH } from '@/lib/scenarios/coldest-month';
 import { textWidthPx } from '../chart/label-stair';
 import { MONTHS } from './year-ledger';
 
@@ -85,7 +86,7 @@ export function heaterNote(context: SectionContext): NoteBlock[] {
   return [
     {
       id: 'heater',
-      node: chosen ? <Inspector context={context} /> : <HeaterWords context={context} />,
+      node: chosen ? <Inspector context={context} /> : <HeaterWords context={context} short={selection !== null} />,
       estimatePx: chosen ? 330 : 74,
       wantedTopPx: tent.y1 - 128,
       toPx: heater ? [(heater.box.x0 + heater.box.x1) / 2, heater.box.y0 + 1] : null,
@@ -94,12 +95,12 @@ export function heaterNote(context: SectionContext): NoteBlock[] {
   ];
 }
 
-export function HeaterWords({ context }: { context: SectionContext }) {
+export function HeaterWords({ context, short }: { context: SectionContext; short?: boolean }) {
   const { doc, evaluation, told, words, select } = context;
   const heater = doc.climate.heater;
   if (!heater) return null;
   const month = evaluation?.year.months.find((each) => each.month === told?.month);
-  const hours = 730;
+  const hours = (DAYS_IN_MONTH[(told?.month ?? 1) - 1] ?? 30) * 24;
   const caution = evaluation?.cautions.find((each) => each.code.startsWith('heater'));
   return (
     <div>
@@ -125,7 +126,7 @@ export function HeaterWords({ context }: { context: SectionContext }) {
           {month.energyKwh.heater.toFixed(0)} kWh of the month’s {month.energyKwh.total.toFixed(0)}.
         </p>
       )}
-      {caution && (
+      {caution && !short && (
         <p className="mt-1 max-w-[24rem] text-12">
           <span className="font-semibold text-ember-ink">Caution.</span> {caution.text}
         </p>

@@ -46,9 +46,10 @@ interface InspectorFrameProps {
 export function InspectorFrame({ title, facts, hint, context, children, verbs }: InspectorFrameProps) {
   const { select, edit } = context;
   return (
-    <section aria-label={title} data-inspector="" className="@container bg-paper">
-      <div className="flex items-baseline justify-between gap-4">
-        <h2 className="text-14 font-semibold text-lamp-ink">{title}</h2>
+    <section aria-label={title} data-inspector="" className="@container">
+      <h2 className="text-14 font-semibold text-lamp-ink">{title}</h2>
+      <div className="flex items-baseline gap-4">
+        <p className="text-12 text-ink-soft">{facts}</p>
         <button
           type="button"
           className="cursor-pointer border-b border-dotted border-ink-soft py-0.5 text-12 text-ink-soft"
@@ -57,7 +58,6 @@ export function InspectorFrame({ title, facts, hint, context, children, verbs }:
           Close
         </button>
       </div>
-      {facts && <p className="text-12 text-ink-soft">{facts}</p>}
       <div className="mt-1 flex gap-6">
         <div className="flex w-full max-w-[13.375rem] flex-none flex-col gap-1.5">{children}</div>
         <div className="hidden text-12 text-ink-soft @[21rem]:block">{edit.readOnly ?? hint}</div>

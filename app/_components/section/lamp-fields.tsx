@@ -71,40 +71,44 @@ export function LampFields({ context, lampId }: LampFieldsProps) {
         derived={words.say(group.fixture.inputPowerW * (group.lamps[0]!.dimFrac ?? 1) * group.lamps.length, 'power')}
         onCommit={(dim) => change('output')((plan) => setLampOutput(plan, ids, dim))}
       />
-      <ClockField
-        label="On at"
-        value={group.onAt}
-        disabled={edit.readOnly !== null}
-        onCommit={(onAt) => change('on')((plan) => setLampSchedule(plan, ids, { onAt }))}
-      />
-      <QuantityField
-        label="For"
-        kind="hours"
-        value={group.hours}
-        min={0}
-        max={24}
-        disabled={edit.readOnly !== null}
-        derived={`to ${offAt(group.onAt, group.hours)}`}
-        onCommit={(hours) => change('hours')((plan) => setLampSchedule(plan, ids, { hours }))}
-      />
-      {doc.fixtures.length > 1 && (
-        <SelectField
-          label="Which lamp"
-          value={group.fixture.id}
+      <div className="flex gap-2">
+        <ClockField
+          label="On at"
+          value={group.onAt}
           disabled={edit.readOnly !== null}
-          options={doc.fixtures.map((fixture) => ({ value: fixture.id, label: fixture.name ?? 'Lamp' }))}
-          onChange={(fixture) => change('fixture')((plan) => setLampFixture(plan, ids, fixture))}
+          onCommit={(onAt) => change('on')((plan) => setLampSchedule(plan, ids, { onAt }))}
         />
-      )}
-      {doc.tiers.length > 1 && (
-        <SelectField
-          label="Lights"
-          value={group.tier?.id ?? ''}
+        <QuantityField
+          label="For"
+          kind="hours"
+          value={group.hours}
+          min={0}
+          max={24}
           disabled={edit.readOnly !== null}
-          options={doc.tiers.map((tier) => ({ value: tier.id, label: words.tier(tier.id) }))}
-          onChange={(tier) => change('tier')((plan) => setLampTier(plan, ids, tier))}
+          derived={`to ${offAt(group.onAt, group.hours)}`}
+          onCommit={(hours) => change('hours')((plan) => setLampSchedule(plan, ids, { hours }))}
         />
-      )}
+      </div>
+      <div className="flex gap-2">
+        {context.fixtures.length > 1 && (
+          <SelectField
+            label="Which lamp"
+            value={group.fixture.id}
+            disabled={edit.readOnly !== null}
+            options={context.fixtures.map((fixture) => ({ value: fixture.id, label: fixture.name ?? 'Lamp' }))}
+            onChange={(fixture) => change('fixture')((plan) => setLampFixture(plan, ids, fixture))}
+          />
+        )}
+        {doc.tiers.length > 1 && (
+          <SelectField
+            label="Lights"
+            value={group.tier?.id ?? ''}
+            disabled={edit.readOnly !== null}
+            options={doc.tiers.map((tier) => ({ value: tier.id, label: words.tier(tier.id) }))}
+            onChange={(tier) => change('tier')((plan) => setLampTier(plan, ids, tier))}
+          />
+        )}
+      </div>
       <TogetherField context={context} group={group} lampId={lampId} />
     </InspectorFrame>
   );
@@ -225,7 +229,7 @@ function LampVerbs({ context, lampId, ids }: LampFieldsProps & { ids: string[] }
           select(null);
         }}
       >
-        {ids.length > 1 ? `Take down all ${ids.length}` : 'Take it down'}
+        {ids.length === 1 ? 'Take it down' : ids.length === 2 ? 'Take both down' : `Take all ${ids.length} down`}
       </Verb>
     </>
   );

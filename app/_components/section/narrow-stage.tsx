@@ -14,7 +14,7 @@ import { RoomLines, SLAB_PX } from './room-lines';
 import { AddWords, AirNote, CircuitWords } from './room-notes';
 import { BillWords, billOf, LedgerKey, LedgerWords } from './section-foot';
 import type { SectionContext } from './section-context';
-import { sectionFrame } from './section-frame';
+import { sectionFrame, sectionPxPerM } from './section-frame';
 import { SectionPicture } from './section-picture';
 import type { StageProps } from './section-stage';
 import { StepperRow } from './stepper-row';
@@ -35,18 +35,14 @@ export function NarrowStage(props: NarrowStageProps) {
   const openFields = useOpenFields(root);
   const hatchId = `${useId()}room`;
   const tablet = widthPx >= 700;
-  const paperPx = tablet ? Math.round(widthPx * 0.52) : widthPx;
+  const paperPx = tablet ? Math.round(widthPx * 0.56) : widthPx;
   const { widthM, depthM, heightM } = input.doc.tent;
-  const floorPx = tablet ? 592 : 444;
+  const room = { maxWidthPx: paperPx - (tablet ? 168 : 110), maxHeightPx: tablet ? 533 : 421 };
+  const floorPx = Math.round(SLAB_PX + (tablet ? 56 : 28) + heightM * sectionPxPerM({ widthM, depthM, heightM }, room));
+  const { maxWidthPx, maxHeightPx } = room;
   const frame = useMemo(
-    () =>
-      sectionFrame({ widthM, depthM, heightM }, view, {
-        maxWidthPx: Math.min(paperPx - 112, tablet ? 355 : 300),
-        maxHeightPx: tablet ? 533 : 416,
-        centrePx: paperPx / 2,
-        floorPx,
-      }),
-    [widthM, depthM, heightM, view, paperPx, tablet, floorPx],
+    () => sectionFrame({ widthM, depthM, heightM }, view, { maxWidthPx, maxHeightPx, centrePx: paperPx / 2, floorPx }),
+    [widthM, depthM, heightM, view, maxWidthPx, maxHeightPx, paperPx, floorPx],
   );
   const { context, drag } = useSection(input, state, frame);
   const letters = keyLetters(context);
@@ -63,6 +59,7 @@ export function NarrowStage(props: NarrowStageProps) {
         <RoomLines widthPx={paperPx} floorPx={floorPx} hatchId={hatchId} walls={false} />
         {tablet && (
           <DimensionPart
+            widthOnly
             model={context.model}
             text={(metres) => context.words.say(metres, 'length')}
             widthNote={context.words.say(frame.acrossM, 'length')}
@@ -74,18 +71,29 @@ export function NarrowStage(props: NarrowStageProps) {
           openFields={openFields}
           stripsBefore={props.stripsBefore(context)}
           labelPx={12}
+          pale={context.doc.placements.length === 0 && context.doc.tiers.length === 0}
         />
         <KeyLetters letters={letters} paperPx={paperPx} />
       </svg>
     </div>
   );
+  const inspected = (
+    <>
+      {context.slots.clash}
+      <StepperRow context={context} />
+      {tablet && state.selection && !context.slots.clash && (
+        <div className="border-b border-line py-3">
+          <Inspector context={context} />
+        </div>
+      )}
+    </>
+  );
   const rows = (
     <div className="flex flex-col">
       {left}
       {empty && props.firstVisit?.(context)}
-      {context.slots.clash}
-      <StepperRow context={context} letters={letters} />
-      <Rows context={context} letters={letters} />
+      {!tablet && inspected}
+      <Rows context={context} letters={letters} inspect={!tablet} />
       <div className="border-b border-line py-3">
         <AirNote context={context} />
       </div>
@@ -94,26 +102,42 @@ export function NarrowStage(props: NarrowStageProps) {
       </div>
     </div>
   );
+  const bill = (
+    <div className="flex flex-col gap-4 py-4">
+      <BillWords context={context} />
+      <div>
+        <LedgerWords context={context} widthPx={Math.min(360, (tablet ? paperPx - 24 : widthPx) - 32)} heightPx={110} />
+        <LedgerKey context={context} row />
+      </div>
+    </div>
+  );
+  const safety = (
+    <div id="cautions" className="flex flex-col gap-3 py-4">
+      <CircuitWords context={context} left />
+      {footEnd ?? <CautionsList context={context} most={6} />}
+    </div>
+  );
   return (
     <div ref={root}>
       <div
         className={tablet ? 'grid gap-6 pr-6' : ''}
         style={tablet ? { gridTemplateColumns: `${paperPx}px minmax(0, 1fr)` } : undefined}
       >
-        {picture}
+        <div>
+          {picture}
+          {tablet && (
+            <div className="pl-6">
+              {inspected}
+              {bill}
+            </div>
+          )}
+        </div>
         <div className={tablet ? 'pt-3' : 'px-4 pt-2'}>
           <ViewChoice view={view} choose={chooseView} quiet />
           {explaining ? <ExplainSheet /> : rows}
+          {!tablet && bill}
+          {safety}
         </div>
-      </div>
-      <div className={`grid gap-4 py-4 ${tablet ? 'grid-cols-2 px-6' : 'px-4'}`}>
-        <BillWords context={context} />
-        <div>
-          <LedgerWords context={context} widthPx={Math.min(360, widthPx - 32)} heightPx={110} />
-          <LedgerKey context={context} row />
-        </div>
-        <CircuitWords context={context} />
-        <div id="cautions">{footEnd ?? <CautionsList context={context} most={6} />}</div>
       </div>
       {!tablet && <TotalsBar context={context} />}
     </div>
@@ -134,15 +158,23 @@ function Letter({ letters, id, selected }: { letters: readonly KeyLetter[]; id: 
 }
 
 /** A row for each thing: the tier that most wants a person first. */
-function Rows({ context, letters }: { context: SectionContext; letters: readonly KeyLetter[] }) {
+function Rows({
+  context,
+  letters,
+  inspect,
+}: {
+  context: SectionContext;
+  letters: readonly KeyLetter[];
+  inspect: boolean;
+}) {
   const { model, worst, selection, select, words } = context;
   const tiers = [...model.tiers].sort((a, b) => Number(b.tier.id === worst) - Number(a.tier.id === worst));
-  const row = (id: string, selected: boolean, node: ReactNode, inspect: boolean) => (
+  const row = (id: string, selected: boolean, node: ReactNode, open: boolean) => (
     <li key={id} className="flex gap-2.5 border-b border-line py-2.5">
       <Letter letters={letters} id={id} selected={selected} />
       <div className="min-w-0 flex-1">
         {node}
-        {inspect && (
+        {open && inspect && (
           <div className="mt-2">
             <Inspector context={context} />
           </div>
@@ -170,7 +202,7 @@ function Rows({ context, letters }: { context: SectionContext; letters: readonly
         return row(
           `lamp-${group.id}`,
           chosen,
-          chosen ? null : (
+          chosen && inspect ? null : (
             <button
               type="button"
               className="min-h-6 cursor-pointer text-left"
@@ -187,12 +219,12 @@ function Rows({ context, letters }: { context: SectionContext; letters: readonly
         row(
           'heater',
           isSelected(selection, 'heater'),
-          isSelected(selection, 'heater') ? null : <HeaterWords context={context} />,
+          isSelected(selection, 'heater') && inspect ? null : <HeaterWords context={context} />,
           isSelected(selection, 'heater'),
         )}
       {fan && row('fan', isSelected(selection, 'fan'), fan.node, isSelected(selection, 'fan'))}
       {water && row('water', isSelected(selection, 'water'), water.node, isSelected(selection, 'water'))}
-      {free && row('free', true, null, true)}
+      {free && inspect && row('free', true, null, true)}
     </ul>
   );
 }

@@ -4,18 +4,19 @@
 import { Explainable } from '../explain';
 import { Num } from '../num';
 import type { NoteBlock } from './annotation-column';
+import { heatWidthPx } from './heat-arrow';
 import type { SectionContext } from './section-context';
 import { applyWayOut } from '@/lib/scenarios/ways-out';
 import { isSelected } from './plan-edit';
 import type { TierModel } from './section-model';
-import { verdictWords, type TierVerdict } from './tier-verdict';
+import { verdictFigure, verdictWords, type TierVerdict } from './tier-verdict';
 
 const link = 'cursor-pointer border-b-2 border-lamp-ink py-0.5 text-left font-semibold text-lamp-ink';
 const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left text-ink';
 
 export function tierNotes(context: SectionContext): NoteBlock[] {
   const { model, verdicts, selection, worst } = context;
-  const many = model.tiers.length > 3;
+  const many = model.tiers.length > 3 || model.frame.pxPerM < 200;
   const blocks: NoteBlock[] = [];
   for (const tier of model.tiers) {
     const verdict = verdicts.get(tier.tier.id);
@@ -72,7 +73,7 @@ export function TierNote({ context, tier, verdict, short, compact }: TierNotePro
         <p className={isWorst ? 'text-22' : 'text-17'}>
           <Explainable path={`tiers.${id}.dli`}>
             <span className={`font-semibold ${TONES[verdict.verdict]}`}>
-              <Num text={verdict.dli.toFixed(1)} />
+              <Num text={verdictFigure(verdict)} />
             </span>
           </Explainable>
           {verdictWords(verdict)}
@@ -185,14 +186,17 @@ export function waterNote(context: SectionContext): NoteBlock[] {
   ];
 }
 
+/** The fan's words stand level with it, as tall as its arrow is wide. */
 export function fanNote(context: SectionContext): NoteBlock[] {
   const { doc, model, evaluation, words, select, selection } = context;
   const { fan, frame } = model;
   const exhaust = doc.climate.exhaust;
   if (!fan || !exhaust) return [];
   const light = evaluation?.heat.coldLight;
+  const front = frame.view === 'front';
+  const arrowPx = front && light ? Math.min(60, heatWidthPx(light.exhaustW + light.latentW)) + 8 : 0;
   const node = (
-    <div>
+    <div className="flex flex-col justify-center" style={{ minHeight: Math.max(38, arrowPx) }}>
       <p className="text-14">
         <button type="button" className={`${dotted} font-semibold`} onClick={() => select({ kind: 'fan' })}>
           Exhaust fan
@@ -212,13 +216,12 @@ export function fanNote(context: SectionContext): NoteBlock[] {
       )}
     </div>
   );
-  const front = frame.view === 'front';
   return [
     {
       id: 'fan',
       node,
-      estimatePx: 38,
-      wantedTopPx: fan.y - 10,
+      estimatePx: Math.max(38, arrowPx),
+      wantedTopPx: front ? fan.y - Math.max(38, arrowPx) / 2 : fan.y - 10,
       toPx: front ? null : [fan.x + fan.r * 0.65, fan.y],
       selected: isSelected(selection, 'fan'),
     },

@@ -24,13 +24,13 @@ interface Leaf {
 }
 
 const rosette: Leaf[] = [
-  { at: [0, 0.1], angleDeg: -78, length: 0.62, width: 0.36, back: true },
-  { at: [0, 0.1], angleDeg: 78, length: 0.62, width: 0.36, back: true },
-  { at: [0, 0.08], angleDeg: -52, length: 0.82, width: 0.4 },
-  { at: [0, 0.08], angleDeg: 52, length: 0.82, width: 0.4 },
-  { at: [0, 0.08], angleDeg: -26, length: 0.9, width: 0.4, back: true },
-  { at: [0, 0.08], angleDeg: 26, length: 0.9, width: 0.4, back: true },
-  { at: [0, 0.06], angleDeg: 0, length: 0.94, width: 0.42 },
+  { at: [0, 0.1], angleDeg: -80, length: 0.66, width: 0.46, back: true },
+  { at: [0, 0.1], angleDeg: 80, length: 0.66, width: 0.46, back: true },
+  { at: [0, 0.06], angleDeg: -24, length: 0.92, width: 0.56, back: true },
+  { at: [0, 0.06], angleDeg: 24, length: 0.92, width: 0.56, back: true },
+  { at: [0, 0.04], angleDeg: -54, length: 0.82, width: 0.54 },
+  { at: [0, 0.04], angleDeg: 54, length: 0.82, width: 0.54 },
+  { at: [0, 0.02], angleDeg: 0, length: 0.86, width: 0.5 },
 ];
 const pairs = (heights: readonly number[], length: number): Leaf[] =>
   heights.flatMap((up, i) => [

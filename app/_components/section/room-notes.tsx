@@ -36,7 +36,7 @@ export function AirNote({ context }: { context: SectionContext }) {
         </p>
         <p className="text-12">
           <button type="button" className={dotted} onClick={() => select({ kind: 'climate' })}>
-            Held at {words.say(dayTempC, 'temperature')} by day, {words.say(nightTempC, 'temperature')} by night
+            Held at {words.neat(dayTempC, 'temperature')} by day, {words.neat(nightTempC, 'temperature')} by night
           </button>
         </p>
       </div>
@@ -45,7 +45,7 @@ export function AirNote({ context }: { context: SectionContext }) {
 }
 
 export function AddWords({ context }: { context: SectionContext }) {
-  const { doc, edit, select, worst, slots } = context;
+  const { doc, edit, select, worst, slots, fixtures } = context;
   const [choosing, setChoosing] = useState(false);
   if (edit.readOnly !== null) return <p className="text-12 text-ink-soft">{edit.readOnly}</p>;
   const tierId = context.selection?.kind === 'tier' ? context.selection.id : (worst ?? doc.tiers[0]?.id ?? null);
@@ -59,7 +59,7 @@ export function AddWords({ context }: { context: SectionContext }) {
   return (
     <div>
       <div className="flex flex-wrap gap-x-5 gap-y-1">
-        <Verb onClick={() => (doc.fixtures.length === 1 ? hang(doc.fixtures[0]!.id) : setChoosing(!choosing))}>
+        <Verb onClick={() => (fixtures.length === 1 ? hang(fixtures[0]!.id) : setChoosing(!choosing))}>
           Hang a lamp
         </Verb>
         <Verb
@@ -80,7 +80,7 @@ export function AddWords({ context }: { context: SectionContext }) {
       </div>
       {choosing && (
         <ul className="mt-1 border-l-[3px] border-lamp pl-3 text-14" aria-label="Which lamp">
-          {doc.fixtures.map((fixture) => (
+          {fixtures.map((fixture) => (
             <li key={fixture.id}>
               <button type="button" className={`${dotted} py-0.5`} onClick={() => hang(fixture.id)}>
                 {fixture.name ?? 'Lamp'}
@@ -90,7 +90,7 @@ export function AddWords({ context }: { context: SectionContext }) {
               </span>
             </li>
           ))}
-          {doc.fixtures.length === 0 && <li className="text-12 text-ink-soft">This garden has no lamps yet.</li>}
+          {fixtures.length === 0 && <li className="text-12 text-ink-soft">This garden has no lamps yet.</li>}
           {slots.fixturesLink && <li className="text-12">{slots.fixturesLink}</li>}
         </ul>
       )}
@@ -99,11 +99,11 @@ export function AddWords({ context }: { context: SectionContext }) {
 }
 
 /** The circuits: what they carry of what they may carry for hours on end. */
-export function CircuitWords({ context }: { context: SectionContext }) {
+export function CircuitWords({ context, left }: { context: SectionContext; left?: boolean }) {
   const { evaluation, doc } = context;
   const names = context.slots.circuitNames;
   return (
-    <ul className="text-right text-12 text-ink-soft">
+    <ul className={`text-12 text-ink-soft ${left ? '' : 'text-right'}`}>
       {(evaluation?.circuits ?? []).map((circuit) => {
         const rating = doc.power.circuits.find((each) => each.id === circuit.id)?.ratingA ?? 0;
         return (
@@ -131,7 +131,7 @@ export function DrawingKey({ bar }: { bar: boolean }) {
       <p>Brackets: what a crop wants in its hours.</p>
       <p className="mt-1 flex items-center gap-2">
         <span className="inline-block h-2.5 w-[26px] flex-none bg-ember" aria-hidden="true" />
-        this wide is 100 W of heat: full comes in, open goes out
+        this wide is 100 W: full comes in, open goes out
       </p>
       {bar && <p className="mt-1">The bar under a shelf: light on its leaves from wall to wall.</p>}
     </div>

@@ -18,6 +18,10 @@ export interface SectionSlots {
   fixturesLink?: ReactNode;
   setTent?: ((patch: Partial<TentBody>) => void) | undefined;
   circuitNames?: Readonly<Record<string, string>> | undefined;
+  /** Every lamp that could be hung; left out: those of the document. */
+  fixtures?: ScenarioDocument['fixtures'] | undefined;
+  /** The document with somebody else's values, while a clash waits: drawn dashed beside ours. */
+  theirs?: ScenarioDocument | undefined;
   /** Stands in the inspector's place while a clash waits for a choice. */
   clash?: ReactNode;
 }
@@ -50,5 +54,6 @@ export interface SectionContext {
   impossible: Impossible | null;
   setImpossible: (impossible: Impossible | null) => void;
   currency: string;
+  fixtures: ScenarioDocument['fixtures'];
   slots: SectionSlots;
 }

@@ -68,9 +68,7 @@ export function BillWords({ context, short }: { context: SectionContext; short?:
         {short ? (
           ''
         ) : (
-          <span className="text-ink">
-            , {edit.held ? 'reckoned again when you let go' : `the ${bill.because} month`}
-          </span>
+          <span className="text-ink">, {edit.held ? 'before this move' : `the ${bill.because} month`}</span>
         )}
       </p>
       <p className="text-14 text-ink-soft">

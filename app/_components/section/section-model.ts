@@ -162,7 +162,7 @@ function reservoirModel(doc: ScenarioDocument, frame: SectionFrame): SectionMode
   if (litres <= 0) return null;
   const widthM = Math.min(0.56, frame.acrossM * 0.55);
   const lowest = Math.min(frame.heightM, ...doc.tiers.map((tier) => tierBottomM(tier)));
-  const tallM = Math.min(litres / 1000 / (0.5 * RESERVOIR_DEPTH_M) + 0.03, Math.max(0.06, lowest - 0.12), 0.45);
+  const tallM = Math.min(litres / 1000 / (0.5 * RESERVOIR_DEPTH_M) + 0.03, Math.max(0.06, lowest - 0.2), 0.45);
   const middle = frame.acrossM / 2 + Math.min(0.06, frame.acrossM * 0.03);
   const box = {
     x0: xPx(frame, middle - widthM / 2),
@@ -209,8 +209,8 @@ function heaterModel(doc: ScenarioDocument, frame: SectionFrame): SectionModel['
   }
   if (frame.view === 'side') return null;
   const away = across === null ? null : across < 0 ? -across : across - doc.tent.widthM;
-  const x0 = frame.leftPx - 76 * Math.max(0.72, scale);
-  const box = { x0, x1: x0 + width, y0: frame.floorPx - height, y1: frame.floorPx };
+  const x0 = Math.max(5, frame.leftPx - 76 * Math.max(0.72, scale));
+  const box = { x0, x1: Math.min(x0 + width, frame.leftPx - 12), y0: frame.floorPx - height, y1: frame.floorPx };
   return { box, portY, inside: false, awayM: away };
 }
 

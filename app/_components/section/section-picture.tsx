@@ -3,23 +3,19 @@
 /** The drawing itself, without its sentences: one group of SVG that every layout sets into its own paper. */
 import { useId, useMemo } from 'react';
 import { FanPart, HeaterPart, UprightsPart, WaterPart } from './device-parts';
+import { HeightOfChosen, HeldLamp, ImpossibleLamp, TheirLamps } from './chosen-parts';
+import { ExamplePart, exampleDocument } from './example-part';
 import { FieldPart } from './field-part';
 import { HandleLayer } from './handle-layer';
-import { HeldPart, Slip } from './held-part';
 import { labelIsolines, type KeepOut } from './isoline-labels';
-import { LampGhost, LampPart } from './lamp-part';
-import { lampOutline } from './lamp-outline';
+import { LampPart } from './lamp-part';
 import { isSelected } from './plan-edit';
 import type { SectionContext } from './section-context';
-import { leafHeightM, servedTier } from '@/lib/scenarios/lamp-pose';
-import { stripProfile } from './light-strip';
 import { DAYS_IN_MONTH } from '@/lib/scenarios/coldest-month';
 import { TentShell } from './tent-shell';
 import { TierPart } from './tier-part';
 import type { Drag } from './use-drag';
 import { useField } from './use-field';
-import { useRail } from './use-ways';
-import { px } from './section-frame';
 
 interface SectionPictureProps {
   context: SectionContext;
@@ -37,10 +33,11 @@ export function SectionPicture({ context, drag, openFields, labelPx = 12, pale, 
   const id = useId();
   const clipId = `${id}clip`;
   const hatchId = `${id}hatch`;
-  const field = useField(doc, frame, edit.held);
+  const example = useMemo(() => (pale ? exampleDocument(doc) : null), [pale, doc]);
+  const field = useField(example ?? doc, frame, edit.held);
   const labels = useMemo(
-    () => (field ? labelIsolines(field.lines, { inside: shrink(tent), keepOut: keepOuts(model) }) : []),
-    [field, tent, model],
+    () => (field && !pale ? labelIsolines(field.lines, { inside: shrink(tent), keepOut: keepOuts(model) }) : []),
+    [field, pale, tent, model],
   );
   const month = evaluation?.year.months.find((each) => each.month === told?.month);
   const heaterW = month ? (month.energyKwh.heater * 1000) / ((DAYS_IN_MONTH[month.month - 1] ?? 30) * 24) : 0;
@@ -62,6 +59,7 @@ export function SectionPicture({ context, drag, openFields, labelPx = 12, pale, 
         {...(pale ? { pale } : {})}
       />
       <TentShell model={model} />
+      {example && <ExamplePart doc={example} frame={frame} />}
       <WaterPart model={model} />
       <UprightsPart uprights={model.uprights} floorPx={frame.floorPx} />
       {model.tiers.map((tier) => {
@@ -92,6 +90,7 @@ export function SectionPicture({ context, drag, openFields, labelPx = 12, pale, 
       <HeaterPart model={model} watts={heaterW} selected={isSelected(selection, 'heater')} />
       <FanPart model={model} watts={outW} selected={isSelected(selection, 'fan')} />
       {chosenGroup && !edit.held && <HeightOfChosen context={context} />}
+      {context.slots.theirs && <TheirLamps context={context} theirs={context.slots.theirs} />}
       {impossible && <ImpossibleLamp context={context} />}
       <HeldLamp context={context} drag={drag} />
       <HandleLayer
@@ -143,109 +142,4 @@ function keepOuts({ tiers, lamps, reservoir, uprights, frame }: SectionContext['
         ]
       : []),
   ];
-}
-
-/** A dimension line from the chosen lamp's face down to the leaves of its tier. */
-function HeightOfChosen({ context }: { context: SectionContext }) {
-  const { model, selection, words } = context;
-  const chosen = model.lamps.find(({ lamp }) => isSelected(selection, 'lamp', lamp.id));
-  if (!chosen) return null;
-  const { frame } = model;
-  const [x, y] = chosen.outline.facePx;
-  const leafM = chosen.group.tier ? leafHeightM(chosen.group.tier) : 0;
-  const end = frame.floorPx - leafM * frame.pxPerM;
-  if (end - y < 24) return null;
-  const text = words.say(chosen.group.aboveLeavesM, 'length');
-  const middle = y + Math.min((end - y) / 2, 60);
-  return (
-    <g aria-hidden="true">
-      <path d={`M${px(x)} ${px(y)}V${px(end)}`} stroke="var(--lamp)" strokeWidth={1.1} strokeDasharray="2 2" />
-      <path d={`M${px(x - 3.5)} ${px(end + 3.5)}l7 -7`} stroke="var(--lamp)" strokeWidth={1.1} />
-      <text
-        x={px(x + 7)}
-        y={px(middle + 4)}
-        fontSize={12}
-        fontWeight={600}
-        fill="var(--ink)"
-        stroke="var(--paper)"
-        strokeOpacity={0.75}
-        strokeWidth={4}
-        paintOrder="stroke"
-      >
-        {text}
-      </text>
-    </g>
-  );
-}
-
-function ImpossibleLamp({ context }: { context: SectionContext }) {
-  const { model, impossible, words, doc } = context;
-  const lamp = model.lamps.find((each) => each.lamp.id === impossible?.lampId);
-  if (!lamp || !impossible) return null;
-  const tier = servedTier(lamp.lamp, doc.tiers);
-  const z = (tier ? leafHeightM(tier) : 0) + impossible.aboveLeavesM;
-  const [x, y] = lamp.lamp.positionM;
-  const shown = Math.min(Math.max(z, 0), doc.tent.heightM);
-  const outline = lampOutline({ ...lamp.lamp, positionM: [x, y, shown] }, lamp.group.fixture, model.frame);
-  const text = `${words.say(impossible.aboveLeavesM, 'length')} lands here`;
-  return (
-    <g>
-      <LampGhost outline={outline} tone="impossible" />
-      <path
-        d={`M${px(outline.holdPx[0])} ${px(outline.holdPx[1])}l26 -26h14`}
-        fill="none"
-        stroke="var(--ember)"
-        strokeWidth={1}
-      />
-      <Slip x={outline.holdPx[0] + 40} y={outline.holdPx[1] - 38} text={text} tone="ember" />
-    </g>
-  );
-}
-
-function HeldLamp({ context, drag }: { context: SectionContext; drag: Drag }) {
-  const { model, words } = context;
-  const held = drag.held?.what === 'lamp' ? drag.held : null;
-  const lamp = held && model.lamps.find((each) => each.lamp.id === held.id);
-  const ids = lamp ? lamp.group.lamps.map((each) => each.id) : [];
-  const tier = lamp?.group.tier ?? null;
-  const rail = useRail(drag.before, held?.id ?? null, ids, tier?.id ?? null);
-  if (!held || !lamp || !drag.before || held.axis === null) return null;
-  const before = drag.before;
-  const leafM = tier ? leafHeightM(tier) : 0;
-  const ghosts = before.placements
-    .filter((each) => ids.includes(each.id))
-    .map((each) => lampOutline(each, lamp.group.fixture, model.frame));
-  if (held.axis === 'across')
-    return (
-      <g>
-        {ghosts.map((ghost, i) => (
-          <LampGhost key={i} outline={ghost} tone="was" />
-        ))}
-        <Slip
-          x={lamp.outline.holdPx[0] + 16}
-          y={lamp.outline.topPx - 34}
-          text={`${words.say(lamp.lamp.positionM[model.frame.view === 'front' ? 0 : 1], 'length')} from the ${model.frame.view === 'front' ? 'left' : 'front'}`}
-        />
-      </g>
-    );
-  const lift = (metres: number) => metres + leafM;
-  return (
-    <HeldPart
-      frame={model.frame}
-      ghosts={ghosts}
-      lead={lamp.outline}
-      railM={rail ? { lowM: lift(rail.lowM), highM: lift(rail.highM) } : { lowM: leafM, highM: lamp.lamp.positionM[2] }}
-      insideM={rail?.insideM ? { fromM: lift(rail.insideM.fromM), toM: lift(rail.insideM.toM) } : null}
-      tag={words.say(lamp.group.aboveLeavesM, 'length')}
-      insideWords={rail?.insideM ? `enough from ${words.say(rail.insideM.toM, 'length')} down` : null}
-    />
-  );
-}
-
-/** The strips' means as they were, for the dashed line of a held lamp. */
-export function stripMeans(
-  context: SectionContext,
-  tiers: readonly { id: string; grid: { nx: number; ny: number; ppfdUmolM2S: number[] } }[],
-) {
-  return new Map(tiers.map((tier) => [tier.id, stripProfile(tier.grid, context.model.frame.view).mean]));
 }

@@ -14,6 +14,8 @@ type Tiers = Parameters<typeof tierName>[0];
 export interface SectionWords {
   units: UnitSystem;
   say: (value: number, kind: QuantityKind, digits?: number) => string;
+  /** Without a decimal that says nothing: 21 °C, 21.5 °C. */
+  neat: (value: number, kind: QuantityKind) => string;
   group: (group: LampGroup) => string;
   groupFacts: (group: LampGroup) => string;
   lamp: (model: LampModel) => string;
@@ -25,7 +27,6 @@ export interface SectionWords {
 }
 
 const SPELLED: Record<string, string> = { cm: 'centimetres', in: 'inches', m: 'metres', ft: 'feet' };
-const COUNTS = ['', '', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight'];
 
 export function sectionWords(tiers: Tiers, units: UnitSystem): SectionWords {
   const say: SectionWords['say'] = (value, kind, digits) =>
@@ -35,7 +36,7 @@ export function sectionWords(tiers: Tiers, units: UnitSystem): SectionWords {
   const group: SectionWords['group'] = (each) => {
     const count = each.lamps.length;
     const name = called(each);
-    return count === 1 ? `${name}${over(each)}` : `${COUNTS[count] ?? count} × ${name}${over(each)}`;
+    return count === 1 ? `${name}${over(each)}` : `${name} × ${count}${over(each)}`;
   };
   const groupFacts: SectionWords['groupFacts'] = (each) => {
     const dim = each.lamps[0]!.dimFrac ?? 1;
@@ -62,6 +63,7 @@ export function sectionWords(tiers: Tiers, units: UnitSystem): SectionWords {
   return {
     units,
     say,
+    neat: (value, kind) => say(value, kind).replace(/\.0(?=\s|$)/, ''),
     group,
     groupFacts,
     lamp,

@@ -5,14 +5,13 @@ import { useEffect, useRef } from 'react';
 import { setLampAboveLeaves } from '@/lib/scenarios/edit-plan';
 import { lampRange } from '@/lib/scenarios/lamp-range';
 import { groupOf } from './lamp-groups';
-import type { KeyLetter } from './key-letters';
 import type { SectionContext } from './section-context';
 
 const STEP_M = 0.01;
 const FIRST_MS = 380;
 const NEXT_MS = 90;
 
-export function StepperRow({ context }: { context: SectionContext; letters: readonly KeyLetter[] }) {
+export function StepperRow({ context }: { context: SectionContext }) {
   const { selection, model, edit, words, doc } = context;
   const group = selection?.kind === 'lamp' ? groupOf(model.groups, selection.id) : undefined;
   const timer = useRef<number | undefined>(undefined);

@@ -65,6 +65,12 @@ export function worstTier(verdicts: ReadonlyMap<string, TierVerdict>): string | 
   return id;
 }
 
+/** The figure itself: one decimal, or two where one would hide that it misses its edge. */
+export function verdictFigure({ verdict, dli, low, high }: TierVerdict): string {
+  const edge = verdict === 'below' ? low : verdict === 'above' ? high : null;
+  return edge !== null && dli.toFixed(1) === edge.toFixed(1) ? dli.toFixed(2) : dli.toFixed(1);
+}
+
 /** What follows the figure: ` of the 12 mol it needs`, ` mol a day, inside lettuce's 12 to 17`. */
 export function verdictWords(verdict: TierVerdict): string {
   const { low, high, crop } = verdict;

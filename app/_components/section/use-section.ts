@@ -112,6 +112,7 @@ export function useSection(input: SectionInput, state: SectionState, frame: Sect
     words,
     edit: watched,
     currency: doc.power.tariff.currency,
+    fixtures: slots.fixtures ?? doc.fixtures,
     slots,
     ...state,
   };

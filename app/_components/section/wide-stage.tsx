@@ -66,12 +66,13 @@ export function WideStage(props: WideStageProps) {
           ...heaterNote(context),
         ]
       : [...lampNotes(context, leftX), ...otherInspector(context), ...heaterNote(context)];
-  const rightBlocks = [...fanNote(context), ...tierNotes(context), ...waterNote(context)];
+  // Seen from the door the fan's words are pinned to the fan: its arrow takes that place.
+  const fan = fanNote(context);
+  const pinned = view === 'front' && !explaining ? fan[0] : undefined;
+  const rightBlocks = [...(pinned ? [] : fan), ...tierNotes(context), ...waterNote(context)];
+  const rightTop = Math.max(COLUMN_TOP_PX, pinned ? pinned.wantedTopPx + pinned.estimatePx + 8 : 0);
   const width = `${words.say(frame.acrossM, 'length')}${view === 'side' ? ' deep' : ''}`;
   const over = Math.max(0, ...(input.evaluation?.tiers ?? []).map((tier) => tier.ppfdUmolM2S.max)) > 800;
-  const indented = rightBlocks.map((block) =>
-    block.id === 'fan' && view === 'front' ? { ...block, node: <div className="pl-10">{block.node}</div> } : block,
-  );
   return (
     <div ref={root} className="relative overflow-x-clip" style={{ paddingTop: floorPx + SLAB_PX }}>
       <svg
@@ -95,10 +96,11 @@ export function WideStage(props: WideStageProps) {
           drag={drag}
           openFields={openFields}
           stripsBefore={props.stripsBefore(context)}
+          pale={empty && doc.tiers.length === 0}
         />
         {view === 'side' && (
           <g fontSize={12} fill="var(--ink-soft)">
-            <text x={frame.leftPx - 30} y={floorPx - 6} textAnchor="end">
+            <text x={frame.leftPx - 52} y={floorPx - 6} textAnchor="end">
               door
             </text>
             <text x={frame.leftPx + frame.acrossM * frame.pxPerM + 12} y={floorPx - 6}>
@@ -147,6 +149,11 @@ export function WideStage(props: WideStageProps) {
           <DrawingKey bar={small} />
         </div>
       </div>
+      {pinned && (
+        <div className="absolute" style={{ left: rightX + 40, width: rightWidth - 40, top: pinned.wantedTopPx }}>
+          {pinned.node}
+        </div>
+      )}
       {explaining ? (
         <div
           className="absolute z-10 overflow-y-auto"
@@ -161,13 +168,13 @@ export function WideStage(props: WideStageProps) {
         </div>
       ) : (
         <AnnotationColumn
-          blocks={indented}
+          blocks={rightBlocks}
           heights={heights}
           column={{
             side: 'right',
             xPx: rightX,
             widthPx: rightWidth,
-            topPx: COLUMN_TOP_PX,
+            topPx: rightTop,
             bottomPx: floorPx - 14 - circuits * 18,
             bendPx: rightX - 40,
           }}
@@ -180,10 +187,10 @@ export function WideStage(props: WideStageProps) {
         <CircuitWords context={context} />
       </div>
       <div
-        className="grid gap-x-4 pt-3 pb-6"
+        className="grid items-start gap-x-4 pt-3 pb-6"
         style={{
           paddingLeft: leftX - 12,
-          gridTemplateColumns: `${centre - 204 - leftX - 4}px 408px 140px minmax(0, 1fr)`,
+          gridTemplateColumns: `${centre - 204 - leftX - 4}px 408px 168px minmax(0, 1fr)`,
           paddingRight: 24,
         }}
       >
