@@ -2,6 +2,7 @@
 
 /** Every caution as a line that opens beside the drawing, with its reason and its source. */
 import { useState } from 'react';
+import { CautionSign } from '../caution-note';
 import type { SectionContext } from './section-context';
 
 function order(severity: string): number {
@@ -24,7 +25,7 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
   return (
     <section aria-label="Cautions">
       <h2 className="flex items-center gap-2 text-14 font-semibold">
-        <CautionMark />
+        <CautionSign />
         {cautions.length === 1 ? '1 caution' : `${cautions.length} cautions`}
       </h2>
       <ul>
@@ -57,14 +58,5 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
         </button>
       )}
     </section>
-  );
-}
-
-export function CautionMark() {
-  return (
-    <svg width="15" height="14" viewBox="0 0 15 14" aria-hidden="true" className="flex-none">
-      <path d="M7.5 1L14 13H1Z" fill="none" stroke="var(--ember)" strokeWidth="1.4" strokeLinejoin="round" />
-      <path d="M7.5 5v4M7.5 10.4v1.2" stroke="var(--ember)" strokeWidth="1.4" />
-    </svg>
   );
 }

@@ -7,6 +7,7 @@ import { setPump, setWater } from '@/lib/scenarios/edit-climate';
 import { placeForLamp } from '@/lib/scenarios/lamp-range';
 import { Button } from '../button';
 import { QuantityField } from '../quantity-field';
+import { Pair } from './inspector';
 import type { SectionContext } from './section-context';
 
 export function FirstVisit({ context }: { context: SectionContext }) {
@@ -40,7 +41,7 @@ export function FirstVisit({ context }: { context: SectionContext }) {
           : 'Hang one over a shelf, and light, warmth and the bill follow as you move it.'}
       </p>
       {slots.setTent && (
-        <div className="flex gap-2">
+        <Pair>
           {(['widthM', 'depthM', 'heightM'] as const).map((key) => (
             <QuantityField
               key={key}
@@ -53,7 +54,7 @@ export function FirstVisit({ context }: { context: SectionContext }) {
               onCommit={(value) => slots.setTent?.({ [key]: value })}
             />
           ))}
-        </div>
+        </Pair>
       )}
       {slots.setTent && <p className="text-12 text-ink-soft">6 ft, 72 in and 180 cm work too.</p>}
       {!locked && (

@@ -4,7 +4,7 @@ import { setHeater } from '@/lib/scenarios/edit-climate';
 import { Choice } from '../choice';
 import { CheckField } from '../check-field';
 import { QuantityField } from '../quantity-field';
-import { InspectorFrame, Verb } from './inspector';
+import { InspectorFrame, Pair, Verb } from './inspector';
 import type { SectionContext } from './section-context';
 
 const UNKNOWN_CLEARANCE_M = 1;
@@ -99,50 +99,47 @@ export function HeaterFields({ context }: { context: SectionContext }) {
   );
 }
 
-/** Where it stands: away from the left wall outside, or from the left and the front inside the tent. */
+/** In the room it blows in by the low port; in the tent its place is measured from the left wall and the front. */
 function PlaceFields({ context }: { context: SectionContext }) {
   const { doc, edit } = context;
   const { tent } = doc;
   const place = doc.climate.heater?.placeM;
-  const within =
-    place !== undefined && place[0] >= 0 && place[0] <= tent.widthM && place[1] >= 0 && place[1] <= tent.depthM;
   const locked = edit.readOnly !== null;
-  const set = (placeM: readonly [number, number, number]) =>
+  const set = (placeM: readonly [number, number, number] | undefined) =>
     edit.apply((plan) => setHeater(plan, { placeM }), 'heater place');
   return (
     <>
       <Choice
         label="Where it stands"
-        value={within ? 'inside' : 'outside'}
+        value={place ? 'inside' : 'outside'}
         disabled={locked}
         options={[
           { value: 'outside', label: 'In the room' },
           { value: 'inside', label: 'In the tent' },
         ]}
-        onChange={(where) =>
-          set(where === 'inside' ? [tent.widthM / 2, tent.depthM / 2, 0.1] : [-1, tent.depthM / 2, 0])
-        }
+        onChange={(where) => set(where === 'inside' ? [tent.widthM / 2, tent.depthM / 2, 0.1] : undefined)}
       />
-      {within ? (
-        <QuantityField
-          label="From the left wall"
-          kind="length"
-          value={place[0]}
-          min={0}
-          max={tent.widthM}
-          disabled={locked}
-          onCommit={(x) => set([x, place[1], place[2]])}
-        />
-      ) : (
-        <QuantityField
-          label="Away from the tent"
-          kind="length"
-          value={place ? Math.max(0, -place[0]) : 0}
-          min={0}
-          max={5}
-          disabled={locked}
-          onCommit={(away) => set([-away, place?.[1] ?? tent.depthM / 2, place?.[2] ?? 0])}
-        />
+      {place && (
+        <Pair>
+          <QuantityField
+            label="From the left wall"
+            kind="length"
+            value={place[0]}
+            min={0}
+            max={tent.widthM}
+            disabled={locked}
+            onCommit={(x) => set([x, place[1], place[2]])}
+          />
+          <QuantityField
+            label="From the front"
+            kind="length"
+            value={place[1]}
+            min={0}
+            max={tent.depthM}
+            disabled={locked}
+            onCommit={(y) => set([place[0], y, place[2]])}
+          />
+        </Pair>
       )}
     </>
   );

@@ -1,7 +1,7 @@
 'use client';
 
 /** The fields of the one thing that is chosen; they and the drawing are twins. */
-import type { ReactNode } from 'react';
+import { Children, type ReactNode } from 'react';
 import { ClimateFields } from './climate-fields';
 import { FanFields } from './fan-fields';
 import { HeaterFields } from './heater-fields';
@@ -77,5 +77,14 @@ export function Verb({ onClick, children, danger }: { onClick: () => void; child
     >
       {children}
     </button>
+  );
+}
+
+/** Two fields that lie side by side in the world lie side by side here. */
+export function Pair({ children }: { children: ReactNode }) {
+  return (
+    <div className="flex gap-2">
+      {Children.map(children, (child) => child && <div className="min-w-0 flex-1">{child}</div>)}
+    </div>
   );
 }

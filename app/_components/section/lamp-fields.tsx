@@ -20,7 +20,7 @@ import { CheckField } from '../check-field';
 import { QuantityField } from '../quantity-field';
 import { SelectField } from '../select-field';
 import { ClockField } from './clock-field';
-import { InspectorFrame, Verb } from './inspector';
+import { InspectorFrame, Pair, Verb } from './inspector';
 import { groupOf, type LampGroup } from './lamp-groups';
 import type { PlanChange } from './plan-edit';
 import type { SectionContext } from './section-context';
@@ -71,7 +71,7 @@ export function LampFields({ context, lampId }: LampFieldsProps) {
         derived={words.say(group.fixture.inputPowerW * (group.lamps[0]!.dimFrac ?? 1) * group.lamps.length, 'power')}
         onCommit={(dim) => change('output')((plan) => setLampOutput(plan, ids, dim))}
       />
-      <div className="flex gap-2">
+      <Pair>
         <ClockField
           label="On at"
           value={group.onAt}
@@ -88,8 +88,8 @@ export function LampFields({ context, lampId }: LampFieldsProps) {
           derived={`to ${offAt(group.onAt, group.hours)}`}
           onCommit={(hours) => change('hours')((plan) => setLampSchedule(plan, ids, { hours }))}
         />
-      </div>
-      <div className="flex gap-2">
+      </Pair>
+      <Pair>
         {context.fixtures.length > 1 && (
           <SelectField
             label="Which lamp"
@@ -108,7 +108,7 @@ export function LampFields({ context, lampId }: LampFieldsProps) {
             onChange={(tier) => change('tier')((plan) => setLampTier(plan, ids, tier))}
           />
         )}
-      </div>
+      </Pair>
       <TogetherField context={context} group={group} lampId={lampId} />
     </InspectorFrame>
   );

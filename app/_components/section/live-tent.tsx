@@ -8,6 +8,7 @@ import { usePlanEditor } from '@/lib/scenarios/use-plan-editor';
 import { FirstVisit } from './first-visit';
 import type { PlanChange, SectionEdit, Selection } from './plan-edit';
 import type { SectionSlots } from './section-context';
+import { SectionExplain } from './section-explain';
 import { SectionStage } from './section-stage';
 import { useUndoKeys } from './use-undo-keys';
 
@@ -64,19 +65,21 @@ export function LiveTent(props: LiveTentProps) {
   );
   const live = useLiveEvaluation(editor.plan);
   return (
-    <SectionStage
-      input={{
-        doc: editor.plan,
-        evaluation: live.evaluation,
-        yearPending: live.yearStatus === 'pending',
-        edit,
-        slots: allSlots,
-      }}
-      initialWidthPx={initialWidthPx}
-      initialSelection={initialSelection}
-      firstVisit={(context) => <FirstVisit context={context} />}
-      left={left}
-      footEnd={footEnd}
-    />
+    <SectionExplain doc={editor.plan} evaluation={live.evaluation}>
+      <SectionStage
+        input={{
+          doc: editor.plan,
+          evaluation: live.evaluation,
+          yearPending: live.yearStatus === 'pending',
+          edit,
+          slots: allSlots,
+        }}
+        initialWidthPx={initialWidthPx}
+        initialSelection={initialSelection}
+        firstVisit={(context) => <FirstVisit context={context} />}
+        left={left}
+        footEnd={footEnd}
+      />
+    </SectionExplain>
   );
 }

@@ -3,7 +3,8 @@
 /** The section on a tablet or a phone: the tent first, its things keyed by letters to ruled rows, the bill at the foot. */
 import { useId, useMemo, useRef, type ReactNode } from 'react';
 import { ExplainSheet } from '../explain';
-import { CautionMark, CautionsList } from './cautions-list';
+import { CautionSign } from '../caution-note';
+import { CautionsList } from './cautions-list';
 import { DimensionPart } from './dimension-part';
 import { HeaterWords } from './heat-notes';
 import { Inspector } from './inspector';
@@ -239,7 +240,7 @@ function TotalsBar({ context }: { context: SectionContext }) {
         {bill ? `in ${MONTHS[bill.month - 1]}` : 'a month'}
       </p>
       <a href="#cautions" className="flex min-h-11 items-center gap-2 text-14 font-semibold">
-        {cautions > 0 && <CautionMark />}
+        {cautions > 0 && <CautionSign />}
         {cautions === 0 ? 'No cautions' : cautions === 1 ? '1 caution' : `${cautions} cautions`}
       </a>
     </div>

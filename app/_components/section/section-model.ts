@@ -51,7 +51,7 @@ export interface SectionModel {
   uprights: { leftPx: number; rightPx: number; topPx: number; widthPx: number } | null;
   reservoir: { box: Box; waterY: number; pump: Box | null } | null;
   pipe: { x: number; fromY: number; toYs: number[] } | null;
-  heater: { box: Box; portY: number; inside: boolean; awayM: number | null } | null;
+  heater: { box: Box; portY: number; inside: boolean } | null;
   fan: { x: number; y: number; r: number } | null;
   stripTopPpfd: number;
 }
@@ -200,18 +200,16 @@ function heaterModel(doc: ScenarioDocument, frame: SectionFrame): SectionModel['
   const height = HEATER_PX.height * Math.max(0.75, scale);
   const place = heater.placeM;
   const across = place ? (frame.view === 'front' ? place[0] : place[1]) : null;
-  const within = place && place[0] >= 0 && place[0] <= doc.tent.widthM && place[1] >= 0 && place[1] <= doc.tent.depthM;
   const portY = frame.floorPx - Math.min(44, frame.pxPerM * 0.13);
-  if (within && across !== null) {
+  if (place && across !== null) {
     const x = Math.min(Math.max(xPx(frame, across), frame.leftPx + width / 2 + 3), rightPx(frame) - width / 2 - 3);
     const y1 = Math.min(frame.floorPx, yPx(frame, place[2]) + height * 0.4);
-    return { box: { x0: x - width / 2, x1: x + width / 2, y0: y1 - height, y1 }, portY, inside: true, awayM: 0 };
+    return { box: { x0: x - width / 2, x1: x + width / 2, y0: y1 - height, y1 }, portY, inside: true };
   }
   if (frame.view === 'side') return null;
-  const away = across === null ? null : across < 0 ? -across : across - doc.tent.widthM;
   const x0 = Math.max(5, frame.leftPx - 76 * Math.max(0.72, scale));
   const box = { x0, x1: Math.min(x0 + width, frame.leftPx - 12), y0: frame.floorPx - height, y1: frame.floorPx };
-  return { box, portY, inside: false, awayM: away };
+  return { box, portY, inside: false };
 }
 
 function fanModel(doc: ScenarioDocument, frame: SectionFrame): SectionModel['fan'] {

@@ -170,12 +170,13 @@ export function TableStage({ input, state, chooseView, widthPx }: StageProps & {
         <ViewChoice view="table" choose={chooseView} quiet />
       </div>
       <TableBehind
-        caption="Things, top to bottom"
+        caption="What hangs and stands in the tent"
+        order="top to bottom"
         columns={[
           { key: 'thing', label: 'Thing' },
           { key: 'what', label: 'What it is' },
-          { key: 'across', label: 'Across' },
-          { key: 'up', label: 'Up' },
+          { key: 'across', label: 'Across', align: 'right' },
+          { key: 'up', label: 'Up', align: 'right' },
           { key: 'distance', label: 'Distance' },
           { key: 'state', label: 'State' },
           { key: 'and', label: 'And' },

@@ -6,7 +6,7 @@ import { planDefault } from '@/lib/scenarios/plan-defaults';
 import { QuantityField } from '../quantity-field';
 import { TextField } from '../text-field';
 import { useState } from 'react';
-import { InspectorFrame, Verb } from './inspector';
+import { InspectorFrame, Pair, Verb } from './inspector';
 import type { SectionContext } from './section-context';
 
 interface TierFieldsProps {
@@ -129,7 +129,7 @@ function SitesFields({
   const sites = tier.sites ?? { rows: 4, columns: 6 };
   const whole = (value: number) => Math.max(1, Math.min(100, Math.round(value)));
   return (
-    <div className="flex gap-2">
+    <Pair>
       <QuantityField
         label="Sites across"
         kind="count"
@@ -149,7 +149,7 @@ function SitesFields({
         derived={`${sites.rows * sites.columns} in all`}
         onCommit={(rows) => onCommit({ ...sites, rows: whole(rows) })}
       />
-    </div>
+    </Pair>
   );
 }
 

@@ -97,7 +97,7 @@ export const twoTierTent: ScenarioDocument = {
     dayTempC: 21,
     nightTempC: 17,
     maxTempC: 28,
-    heater: { ratedPowerW: 300, clearanceM: null, placeM: [-1, 0.6, 0] },
+    heater: { ratedPowerW: 300, clearanceM: null },
     exhaust: { maxAirflowM3H: 150, inputPowerW: 12 },
   },
   water: { reservoirL: 40, pump: { inputPowerW: 18 }, flood: { minutes: 10, everyMinutes: 120 } },
