@@ -1,0 +1,129 @@
+import 'server-only';
+
+import { requireAllowed } from '../auth/require-allowed';
+import { allowedActions } from '../auth/permissions';
+import type { GardenActor } from '../auth/session';
+import { resolveTarget, type OwnTarget } from '../crops/reference-target';
+import { targetKey, type ResolvedTarget } from '../crops/crop.schema';
+import { inGarden, type GardenTransaction } from '../db/transactions';
+import { toScenarioDocument } from '../evaluation/scenario-document';
+import type { ScenarioDocument } from '../evaluation/evaluate-scenario';
+import { gardenById } from '../gardens/garden.queries';
+import type { Garden } from '../gardens/garden.schema';
+import { fixturesOf } from '../fixtures/fixture.service';
+import type { Fixture } from '../fixtures/fixture.schema';
+import { notFoundHere } from '../http/app-error';
+import { referenceData } from '../reference-data/reference-data';
+import { roomsOf } from '../rooms/room.service';
+import type { Room } from '../rooms/room.schema';
+import { defaultTariff } from '../tariffs/default-tariff';
+import { targetsOf } from '../targets/target.service';
+import { tentsOf } from '../tents/tent.service';
+import type { Tent } from '../tents/tent.schema';
+import { scenariosOf } from './scenario.queries';
+import type { Scenario, Workbench } from './scenario.schema';
+
+/** A garden's rows, read once in one transaction. A garden is a household's or a school's: some rooms, some tents. */
+export interface GardenData {
+  garden: Garden;
+  rooms: Room[];
+  tents: Tent[];
+  scenarios: Scenario[];
+  fixtures: Fixture[];
+  ownTargets: OwnTarget[];
+}
+
+export async function readGardenData(trx: GardenTransaction, actor: GardenActor): Promise<GardenData> {
+  const { gardenId, role } = actor;
+  const garden = await gardenById(trx, gardenId);
+  if (!garden) throw notFoundHere('garden');
+  return {
+    garden: { ...garden, role },
+    rooms: await roomsOf(trx, gardenId),
+    tents: await tentsOf(trx, gardenId),
+    scenarios: await scenariosOf(trx, gardenId),
+    fixtures: await fixturesOf(trx, gardenId),
+    ownTargets: await targetsOf(trx, gardenId),
+  };
+}
+
+const EVERYTHING = ['light', 'heater', 'exhaust', 'circulation', 'pump'];
+
+/** Rated watts that a tent's scenario in use puts on each circuit of its room. */
+function loadsOnCircuits(room: Room, { plan }: Scenario, fixtures: readonly Fixture[]): Record<string, number> {
+  const lamps = plan.placements.map((placement) => ({
+    id: placement.id,
+    watts: fixtures.find((fixture) => fixture.fixtureId === placement.fixture)?.spec.inputPowerW ?? 0,
+  }));
+  const devices: Record<string, number> = {
+    heater: plan.climate.heater?.ratedPowerW ?? 0,
+    exhaust: plan.climate.exhaust?.inputPowerW ?? 0,
+    circulation: plan.climate.circulation?.inputPowerW ?? 0,
+    pump: plan.water?.pump?.inputPowerW ?? 0,
+  };
+  const named = new Set(Object.values(plan.circuitLoads ?? {}).flat());
+  return Object.fromEntries(
+    room.power.circuits.map(({ id }, index) => {
+      const carries = plan.circuitLoads ? (plan.circuitLoads[id] ?? []) : index === 0 ? EVERYTHING : [];
+      const light = lamps
+        .filter((lamp) => (named.has(lamp.id) ? carries.includes(lamp.id) : carries.includes('light')))
+        .reduce((sum, lamp) => sum + lamp.watts, 0);
+      return [id, light + carries.reduce((sum, load) => sum + (devices[load] ?? 0), 0)];
+    }),
+  );
+}
+
+function otherLoadsFor({ tents, scenarios, fixtures }: GardenData, room: Room, tentId: string): Record<string, number> {
+  const sums: Record<string, number> = {};
+  for (const tent of tents) {
+    if (tent.tentId === tentId || tent.roomId !== room.roomId) continue;
+    const current = scenarios.find((scenario) => scenario.scenarioId === tent.currentScenarioId);
+    if (!current) continue;
+    for (const [circuit, watts] of Object.entries(loadsOnCircuits(room, current, fixtures)))
+      sums[circuit] = (sums[circuit] ?? 0) + watts;
+  }
+  return sums;
+}
+
+function targetsFor({ ownTargets }: GardenData, { plan }: Scenario): ResolvedTarget[] {
+  const found = new Map<string, ResolvedTarget>();
+  for (const { targetRef } of plan.tiers) {
+    const target = targetRef ? resolveTarget(targetRef, ownTargets, referenceData().crops) : null;
+    if (target) found.set(targetKey(target), target);
+  }
+  return [...found.values()];
+}
+
+/** All that a scenario's pages need, from a garden's rows. */
+export function workbenchOf(data: GardenData, actor: GardenActor, scenario: Scenario): Workbench {
+  const tent = data.tents.find((each) => each.tentId === scenario.tentId)!;
+  const room = data.rooms.find((each) => each.roomId === tent.roomId)!;
+  const siblings = data.scenarios.filter((each) => each.tentId === tent.tentId);
+  return {
+    scenario,
+    tent,
+    room,
+    garden: data.garden,
+    fixtures: data.fixtures,
+    targets: targetsFor(data, scenario),
+    referenceTariff: defaultTariff(data.garden.currency, referenceData().prices),
+    siblings: siblings.map(({ scenarioId, name, updatedAt }) => ({ scenarioId, name, updatedAt })),
+    otherLoads: otherLoadsFor(data, room, tent.tentId),
+    can: allowedActions(actor.role),
+  };
+}
+
+export function documentOf(workbench: Workbench): ScenarioDocument {
+  const { scenario, ...rest } = workbench;
+  return toScenarioDocument({ name: scenario.name, plan: scenario.plan, ...rest });
+}
+
+export async function getWorkbench(actor: GardenActor, scenarioId: string): Promise<Workbench> {
+  requireAllowed(actor, 'scenario.read');
+  return inGarden(actor.gardenId, async (trx) => {
+    const data = await readGardenData(trx, actor);
+    const scenario = data.scenarios.find((each) => each.scenarioId === scenarioId);
+    if (!scenario) throw notFoundHere('scenario');
+    return workbenchOf(data, actor, scenario);
+  });
+}
