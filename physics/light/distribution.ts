@@ -4,10 +4,11 @@ import type { Distribution } from './light-documents';
 /**
  * Relative intensity of a lamp by direction, 1/sr, so that its integral over the sphere is 1.
  *
- * @param gammaRad angle from the optical axis, 0…π
- * @param cRad angle about it from the fixture's axis, −π…π
+ * @param cosGamma cosine of the angle from the optical axis, −1…1
+ * @param x part of the direction along the fixture's axis (C = 0), of any scale
+ * @param y part along its third direction (C = 90°), of the same scale
  */
-export type Intensity = (gammaRad: number, cRad: number) => number;
+export type Intensity = (cosGamma: number, x: number, y: number) => number;
 
 const RAD = Math.PI / 180;
 
@@ -58,32 +59,45 @@ function foldC(cDeg: number, last: number): number {
   return c;
 }
 
-function tableIntensity(table: Extract<Distribution, { type: 'table' }>): Intensity {
+type Table = Extract<Distribution, { type: 'table' }>;
+
+const rowsOf = ({ intensity }: Table): number[][] =>
+  Array.isArray(intensity[0]) ? (intensity as number[][]) : [intensity as number[]];
+
+const angleOf = (cos: number) => Math.acos(cos > 1 ? 1 : cos < -1 ? -1 : cos);
+
+function tableIntensity(table: Table): Intensity {
   const gammaRad = table.gammaDeg.map((gamma) => gamma * RAD);
+  const first = gammaRad[0]! - 1e-12;
   const beyond = gammaRad.at(-1)! + 1e-12;
-  const rows = Array.isArray(table.intensity[0]) ? (table.intensity as number[][]) : [table.intensity as number[]];
+  const rows = rowsOf(table);
   const integrals = rows.map((row) => planeIntegral(gammaRad, row));
   const cDeg = table.cDeg && rows.length > 1 ? table.cDeg : null;
-  if (!cDeg) {
-    const row = rows[0]!;
-    const total = 2 * Math.PI * integrals[0]!;
-    return (gamma) => {
-      if (gamma > beyond) return 0;
-      const [i, part] = bracket(gammaRad, gamma);
-      return (row[i]! + part * (row[i + 1]! - row[i]!)) / total;
-    };
+  const last = cDeg?.at(-1) ?? 360;
+  let mean = integrals[0]!;
+  if (cDeg) {
+    mean = 0;
+    for (let i = 1; i < cDeg.length; i += 1)
+      mean += ((integrals[i]! + integrals[i - 1]!) / 2) * ((cDeg[i]! - cDeg[i - 1]!) / last);
   }
-  const last = cDeg.at(-1)!;
-  let mean = 0;
-  for (let i = 1; i < cDeg.length; i += 1)
-    mean += ((integrals[i]! + integrals[i - 1]!) / 2) * (cDeg[i]! - cDeg[i - 1]!);
-  const total = (2 * Math.PI * mean) / last;
-  return (gamma, cRad) => {
-    if (gamma > beyond) return 0;
+  const total = 2 * Math.PI * mean;
+  if (!(total > 0))
+    throw new DomainError({
+      quantity: 'sum of a table of intensities',
+      value: total,
+      min: 1e-12,
+      max: Infinity,
+      unit: '',
+    });
+  const scaled = rows.map((row) => row.map((value) => value / total));
+  const along = (row: readonly number[], g: number, part: number) => row[g]! + part * (row[g + 1]! - row[g]!);
+  return (cosGamma, x, y) => {
+    const gamma = angleOf(cosGamma);
+    if (gamma > beyond || gamma < first) return 0;
     const [g, gPart] = bracket(gammaRad, gamma);
-    const [c, cPart] = bracket(cDeg, foldC(cRad / RAD, last));
-    const along = (row: readonly number[]) => row[g]! + gPart * (row[g + 1]! - row[g]!);
-    return (along(rows[c]!) * (1 - cPart) + along(rows[c + 1]!) * cPart) / total;
+    if (!cDeg) return along(scaled[0]!, g, gPart);
+    const [c, cPart] = bracket(cDeg, foldC(Math.atan2(y, x) / RAD, last));
+    return along(scaled[c]!, g, gPart) * (1 - cPart) + along(scaled[c + 1]!, g, gPart) * cPart;
   };
 }
 
@@ -91,15 +105,85 @@ function tableIntensity(table: Extract<Distribution, { type: 'table' }>): Intens
 export function intensityOf(distribution: Distribution): Intensity {
   switch (distribution.type) {
     case 'lambertian':
-      return (gamma) => (gamma < Math.PI / 2 ? Math.cos(gamma) / Math.PI : 0);
+      return (cos) => (cos > 0 ? cos / Math.PI : 0);
     case 'isotropic':
       return () => 1 / (4 * Math.PI);
     case 'cosinePower': {
       const m = cosinePowerOf(distribution.beamAngleDeg);
       const i0 = (m + 1) / (2 * Math.PI);
-      return (gamma) => (gamma < Math.PI / 2 ? i0 * Math.cos(gamma) ** m : 0);
+      return (cos) => (cos > 0 ? i0 * cos ** m : 0);
     }
     case 'table':
       return tableIntensity(distribution);
+  }
+}
+
+/** How far a pattern reaches and how fast it changes. */
+export interface BeamShape {
+  /** The angle over which the intensity changes by as much as its peak, rad: 1 for Lambert's law. */
+  scaleRad: number;
+  /** Beyond this angle from the axis less than a millionth of the peak is left, rad. */
+  reachRad: number;
+}
+
+export function beamShapeOf(distribution: Distribution): BeamShape {
+  switch (distribution.type) {
+    case 'lambertian':
+      return { scaleRad: 1, reachRad: Math.PI / 2 };
+    case 'isotropic':
+      return { scaleRad: Math.PI, reachRad: Math.PI };
+    case 'cosinePower': {
+      const m = cosinePowerOf(distribution.beamAngleDeg);
+      const steepest = m > 1 ? Math.sqrt(m) * ((m - 1) / m) ** ((m - 1) / 2) : 1;
+      return { scaleRad: 1 / steepest, reachRad: Math.acos(1e-6 ** (1 / m)) };
+    }
+    case 'table': {
+      const rows = rowsOf(distribution);
+      const peak = Math.max(...rows.flat());
+      const gammaDeg = distribution.gammaDeg;
+      let steepest = 0;
+      for (const row of rows)
+        for (let i = 1; i < row.length; i += 1)
+          steepest = Math.max(steepest, Math.abs(row[i]! - row[i - 1]!) / ((gammaDeg[i]! - gammaDeg[i - 1]!) * RAD));
+      return { scaleRad: steepest > 0 ? peak / steepest : Math.PI, reachRad: gammaDeg.at(-1)! * RAD };
+    }
+  }
+}
+
+const CDF_STEPS = 512;
+
+/**
+ * The angles from the axis that part a lamp's photons into `count` equal shares, at the middle of each; axial mean of a table.
+ */
+export function gammaQuantiles(distribution: Distribution, count: number): Float64Array {
+  const shares = Float64Array.from({ length: count }, (_, i) => (i + 0.5) / count);
+  switch (distribution.type) {
+    case 'lambertian':
+      return shares.map((share) => Math.acos(Math.sqrt(1 - share)));
+    case 'isotropic':
+      return shares.map((share) => Math.acos(1 - 2 * share));
+    case 'cosinePower': {
+      const m = cosinePowerOf(distribution.beamAngleDeg);
+      return shares.map((share) => Math.acos((1 - share) ** (1 / (m + 1))));
+    }
+    case 'table': {
+      const rows = rowsOf(distribution);
+      const gammaRad = distribution.gammaDeg.map((gamma) => gamma * RAD);
+      const mean = gammaRad.map((_, i) => rows.reduce((sum, row) => sum + row[i]!, 0));
+      const from = gammaRad[0]!;
+      const step = (gammaRad.at(-1)! - from) / CDF_STEPS;
+      const sums = new Float64Array(CDF_STEPS + 1);
+      for (let k = 0; k < CDF_STEPS; k += 1) {
+        const gamma = from + (k + 0.5) * step;
+        const [i, part] = bracket(gammaRad, gamma);
+        sums[k + 1] = sums[k]! + (mean[i]! + part * (mean[i + 1]! - mean[i]!)) * Math.sin(gamma);
+      }
+      let k = 0;
+      return shares.map((share) => {
+        const sought = share * sums[CDF_STEPS]!;
+        while (k < CDF_STEPS - 1 && sums[k + 1]! < sought) k += 1;
+        return from + (k + (sought - sums[k]!) / (sums[k + 1]! - sums[k]!)) * step;
+      });
+    }
   }
 }

@@ -1,6 +1,6 @@
-import { DomainError } from '../domain-error';
-import { intensityOf, type Intensity } from './distribution';
-import type { SceneFixture, Vec3 } from './light-documents';
+import { DomainError, requireWithin } from '../domain-error';
+import { beamShapeOf, intensityOf, type BeamShape, type Intensity } from './distribution';
+import type { Distribution, SceneFixture, Vec3 } from './light-documents';
 import { createOccluder, type Occluder } from './occluder';
 import { add, cross, dot, length, scale, subtract, unit } from './vector';
 
@@ -13,14 +13,24 @@ export interface Emitter {
   axis: Vec3;
   side: Vec3;
   ppf: number;
+  distribution: Distribution;
   intensity: Intensity;
   lambertian: boolean;
+  beam: BeamShape;
   /** null for a point. */
-  face: { lengthM: number; widthM: number; areaM2: number; corners: Vec3[] } | null;
+  face: LampFace | null;
   /** What it hides of other lamps; null for a point. */
   body: Occluder | null;
   bodyReflectance: number;
   bodyThicknessM: number;
+}
+
+export interface LampFace {
+  lengthM: number;
+  widthM: number;
+  areaM2: number;
+  /** Four corners in order, three numbers each. */
+  polygon: Float64Array;
 }
 
 function frameOf(aimGiven: Vec3, axisGiven: Vec3): Pick<Emitter, 'aim' | 'axis' | 'side'> {
@@ -49,15 +59,26 @@ function frameOf(aimGiven: Vec3, axisGiven: Vec3): Pick<Emitter, 'aim' | 'axis' 
 
 export function createEmitter(fixture: SceneFixture): Emitter {
   const frame = frameOf(fixture.aim, fixture.axis);
+  requireWithin({ quantity: 'photon flux of a lamp', value: fixture.ppf, min: 0, max: 1e6, unit: 'µmol/s' });
   const common = {
     id: fixture.id,
     position: fixture.position,
     ...frame,
     ppf: fixture.ppf,
     intensity: intensityOf(fixture.distribution),
+    beam: beamShapeOf(fixture.distribution),
+    distribution: fixture.distribution,
     lambertian: fixture.distribution.type === 'lambertian',
   };
   if (fixture.shape === 'point') return { ...common, face: null, body: null, bodyReflectance: 0, bodyThicknessM: 0 };
+  if (fixture.distribution.type === 'isotropic')
+    throw new DomainError({
+      quantity: 'length of a lamp that shines alike to all sides',
+      value: fixture.length,
+      min: 0,
+      max: 0,
+      unit: 'm; such a lamp is a point',
+    });
   const lengthM = fixture.length ?? 0;
   const widthM = fixture.width ?? 0;
   if (!(lengthM > 0))
@@ -74,7 +95,7 @@ export function createEmitter(fixture: SceneFixture): Emitter {
       lengthM,
       widthM,
       areaM2: lengthM * widthM,
-      corners: [corner(-1, -1), corner(1, -1), corner(1, 1), corner(-1, 1)],
+      polygon: Float64Array.from([corner(-1, -1), corner(1, -1), corner(1, 1), corner(-1, 1)].flat()),
     },
     body: createOccluder({
       centre: subtract(fixture.position, scale(frame.aim, bodyThicknessM / 2)),

@@ -1,89 +1,104 @@
 import type { ResolvedScenario } from '../plan/resolved-scenario';
-import { directPpfd } from './direct';
+import { faceShare, unitPpfd } from './direct';
 import type { Emitter } from './emitter';
+import { firstBounce } from './first-bounce';
+import { kept, type LightCache } from './light-cache';
 import type { Vec3 } from './light-documents';
-import { prepareScene, type SceneGeometry } from './scene-geometry';
+import { extentOf, mayHide, type Extent } from './reach';
+import { prepareScene } from './scene-geometry';
 import { sceneFromScenario } from './scene-from-scenario';
-import { createZoneModel, firstBounce, solveZones, zoneAt, type ZoneModel } from './zones';
+import { createZoneModel, seenOfLevel, solveZones, zoneAt } from './zones';
 
-/**
- * What may be kept between two evaluations, so that moving one lamp reckons that lamp alone.
- *
- * Keys are the geometry and the poses themselves, so a stale entry is never met; old entries fall out when there are many.
- */
-export interface LightCache {
-  entries: Map<string, Float64Array>;
+export { createLightCache, type LightCache } from './light-cache';
+
+/** Where light is wanted; `name` tells point sets of one rack apart. */
+export interface PointSet {
+  name: string;
+  points: readonly Vec3[];
+  extent: Extent;
 }
 
-const MOST_ENTRIES = 600;
+export const pointSet = (name: string, points: readonly Vec3[]): PointSet => ({
+  name,
+  points,
+  extent: extentOf(points),
+});
 
-export const createLightCache = (): LightCache => ({ entries: new Map() });
-
-function kept(cache: LightCache | undefined, key: string, make: () => Float64Array): Float64Array {
-  if (!cache) return make();
-  const found = cache.entries.get(key);
-  if (found) {
-    // Seen again: to the young end.
-    cache.entries.delete(key);
-    cache.entries.set(key, found);
-    return found;
-  }
-  const made = make();
-  cache.entries.set(key, made);
-  if (cache.entries.size > MOST_ENTRIES) cache.entries.delete(cache.entries.keys().next().value!);
-  return made;
-}
-
-/** A rack with its light, asked for point sets: each lamp's own share at full output, direct and reflected. */
+/** A rack with its light: each lamp's own share at full output, direct and reflected. */
 export interface LightField {
   lamps: Emitter[];
-  /** PPFD of one lamp on level leaves at the points; `name` tells point sets apart. */
-  lampAt(lamp: number, name: string, points: readonly Vec3[]): Float64Array;
-  hasReflections: boolean;
+  /** PPFD of each lamp on level leaves at the points. */
+  lampsAt(set: PointSet): Float64Array[];
 }
 
 const UP: Vec3 = [0, 0, 1];
 
-/** What other lamps' bodies hide is part of a lamp's own light; its key therefore holds every body near it. */
-function poseKey(lamp: Emitter): string {
-  return `${lamp.position.join()};${lamp.aim.join()};${lamp.axis.join()};${lamp.face ? `${lamp.face.lengthM},${lamp.face.widthM},${lamp.bodyThicknessM}` : ''}`;
-}
+const poseKey = ({ position, aim, axis, face, bodyThicknessM }: Emitter): string =>
+  `${position.join()};${aim.join()};${axis.join()};${face ? `${face.lengthM},${face.widthM},${bodyThicknessM}` : ''}`;
 
 export function createLightField(scenario: ResolvedScenario, cache?: LightCache): LightField {
   const scene = sceneFromScenario(scenario);
-  const geometry: SceneGeometry = prepareScene(scene);
-  const { emitters, occluders } = geometry;
+  const { emitters, solids } = prepareScene(scene);
+  const model = createZoneModel(scene, emitters);
   const rackKey = JSON.stringify([scene.tent, scene.slabs, scene.boxes]);
-  const bodies = emitters.filter((lamp) => lamp.body).map(poseKey);
-  let model: ZoneModel | undefined;
-  const zones = () => (model ??= createZoneModel(scene, emitters));
+  const rack = solids.map(({ occluder }) => occluder);
+  const poses = emitters.map(poseKey);
+  const patterns = new Map<string, string>();
+  const fixtureKeys = emitters.map((lamp, i) => {
+    const { fixture } = scenario.placements[i]!;
+    if (!patterns.has(fixture)) patterns.set(fixture, JSON.stringify(lamp.distribution));
+    return `${rackKey}#${poses[i]}#${patterns.get(fixture)}`;
+  });
+  const faces = emitters.map((lamp) => extentOf(lamp.face?.polygon ?? [lamp.position]));
 
-  const lampKey = (lamp: Emitter, index: number) => {
-    const own = poseKey(lamp);
-    // A body only matters to another lamp; leaving its own out keeps a dragged lamp from spoiling the rest when nothing is near.
-    const others = bodies.filter((pose) => pose !== own).join('|');
-    return `${rackKey}#${own}#${JSON.stringify(scene.fixtures[index]!.distribution)}#${others}`;
+  /** Which other bodies may hide this lamp from the points: only they are part of its key, and of its sum. */
+  const hiding = (index: number, { extent }: PointSet): number[] => {
+    const { aim, face } = emitters[index]!;
+    const near = faces[index]!;
+    return emitters.flatMap((other, i) => {
+      if (i === index || !other.body) return [];
+      // A point shines to all sides, so nothing is behind it.
+      return mayHide(other.body, near, extent, face ? aim : null) ? [i] : [];
+    });
+  };
+
+  const zoneLevels = emitters.map((lamp, i) => {
+    const bounce = kept(cache, `${fixtureKeys[i]}#bounce`, () => firstBounce({ scene, model, solids }, lamp).reflected);
+    return solveZones(model, bounce);
+  });
+
+  const mapsOf = (index: number, set: PointSet): { unit: Float64Array; faces: Float64Array } => {
+    const lamp = emitters[index]!;
+    const bodies = hiding(index, set);
+    const key = `${fixtureKeys[index]}#${set.name}#${bodies.map((i) => poses[i]).join('|')}`;
+    const boxes = () => [...rack, ...bodies.map((i) => emitters[i]!.body!)];
+    const unit = kept(cache, key, () => {
+      const past = boxes();
+      return Float64Array.from(set.points, (point) => unitPpfd(point, UP, lamp, past));
+    });
+    const faces = kept(cache, `${key}#face`, () => {
+      const past = boxes();
+      return Float64Array.from(set.points, (point, at) => faceShare(point, UP, lamp, past, unit[at]!));
+    });
+    return { unit, faces };
   };
 
   return {
     lamps: emitters,
-    hasReflections:
-      Object.values(scene.tent.reflectance).some((value) => value > 0) ||
-      scene.slabs.some((slab) => slab.reflectanceTop > 0 || slab.reflectanceBottom > 0),
-    lampAt(index, name, points) {
-      const lamp = emitters[index]!;
-      const key = lampKey(lamp, index);
-      const one: Emitter = { ...lamp, ppf: 1 };
-      const level = kept(cache, `${key}#haze`, () =>
-        solveZones(zones(), firstBounce(zones(), lamp, occluders).reflected),
-      );
-      const unitMap = kept(cache, `${key}#${name}`, () =>
-        Float64Array.from(
-          points,
-          (point) => directPpfd(point, UP, one, occluders) + level[zoneAt(zones().levels, point[2])]!,
+    lampsAt(set) {
+      const maps = emitters.map((_, index) => mapsOf(index, set));
+      const zone = Int32Array.from(set.points, (point) => zoneAt(model.levels, point[2]));
+      const seen = Float64Array.from(zone, (at, i) =>
+        seenOfLevel(
+          model.zones[at]!,
+          maps.reduce((sum, { faces }) => sum + faces[i]!, 0),
         ),
       );
-      return unitMap.map((value) => value * lamp.ppf);
+      return maps.map(({ unit }, index) => {
+        const { ppf } = emitters[index]!;
+        const level = zoneLevels[index]!;
+        return unit.map((value, i) => ppf * (value + level[zone[i]!]! * seen[i]!));
+      });
     },
   };
 }

@@ -1,6 +1,6 @@
 import type { ResolvedScenario, ResolvedTier } from '../plan/resolved-scenario';
 import { cellCentres, statistics } from './evaluate-light-scene';
-import { createLightField, type LightCache, type LightField } from './light-field';
+import { createLightField, pointSet, type LightCache, type LightField } from './light-field';
 
 /** Sensor cells are at most this wide, m. */
 export const CELL_M = 0.1;
@@ -44,12 +44,16 @@ function lightTier(tier: ResolvedTier, scenario: ResolvedScenario, field: LightF
     ny,
     z: canopyHeightM(tier),
   });
-  const name = `tier ${tier.x0M},${tier.x1M},${tier.y0M},${tier.y1M},${canopyHeightM(tier)}`;
+  const set = pointSet(`tier ${tier.x0M},${tier.x1M},${tier.y0M},${tier.y1M},${canopyHeightM(tier)}`, points);
   const grid = new Float64Array(points.length);
   let emitted = 0;
+  const maps = field.lampsAt(set);
   const byPlacement = scenario.placements.map((placement, index) => {
-    const own = field.lampAt(index, name, points).map((value) => value * placement.dimFrac);
-    own.forEach((value, cell) => (grid[cell]! += value));
+    const own = maps[index]!;
+    for (let cell = 0; cell < own.length; cell += 1) {
+      own[cell]! *= placement.dimFrac;
+      grid[cell]! += own[cell]!;
+    }
     emitted += field.lamps[index]!.ppf * placement.dimFrac;
     return { id: placement.id, grid: own, meanPpfdUmolM2S: statistics(own).mean };
   });

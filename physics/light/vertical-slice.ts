@@ -1,7 +1,7 @@
 import type { ScenarioDocument } from '../plan/scenario-document';
 import { resolveScenario } from '../plan/resolve-scenario';
 import type { Vec3 } from './light-documents';
-import { createLightField, type LightCache } from './light-field';
+import { createLightField, pointSet, type LightCache } from './light-field';
 
 export interface SliceRequest {
   /** front: the plane y = atM, x across; side: the plane x = atM, y across. */
@@ -39,10 +39,12 @@ export function verticalSlice(
     }
   }
   const field = createLightField(scenario, cache);
+  const set = pointSet(`slice ${cut},${atM},${nx},${nz}`, points);
   const ppfdUmolM2S = new Float32Array(points.length);
+  const maps = field.lampsAt(set);
   scenario.placements.forEach((placement, index) => {
     if (placement.dimFrac === 0) return;
-    const own = field.lampAt(index, `slice ${cut},${atM},${nx},${nz}`, points);
+    const own = maps[index]!;
     for (let at = 0; at < own.length; at += 1) ppfdUmolM2S[at]! += own[at]! * placement.dimFrac;
   });
   solid.forEach((is, at) => {

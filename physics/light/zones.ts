@@ -1,7 +1,6 @@
 import type { Emitter } from './emitter';
-import { directPpfd } from './direct';
-import type { LightScene, SceneSlab, Vec3 } from './light-documents';
-import type { Occluder } from './occluder';
+import type { FaceReflectance, LightScene, SceneBox, SceneSlab } from './light-documents';
+import { undersideOf } from './scene-geometry';
 
 /**
  * Reflected light, as an estimate: the tent is a stack of zones between its tiers, each lit evenly by what its surfaces
@@ -9,17 +8,21 @@ import type { Occluder } from './occluder';
  *
  *   A E = Φ₁ + Σ ρ A E (own surfaces) + Σ Aₒ E' (openings), for each zone; E' is the neighbour's level.
  *
+ * A leaf of the zone gets E·(1 − F)/(1 − A_f/A): F is the share of its sky that lamps' faces take up, from where nothing is
+ * thrown back, and A_f their area; the mean over all that bounds the zone is E again, since Σ Aᵢ Fᵢ = A_f.
+ *
  * Φ₁ is the photon flux that the zone's surfaces reflect of the lamps' direct light. With one zone this is the integrating
  * sphere, E = Φ₁/(A(1 − ρ)). Photons are conserved: what is emitted is absorbed, to rounding.
  *
- * @source [Walsh-sphere] the integrating enclosure; the stack of zones is ours, and stands in until surfaces exchange light one by one
- * @accuracy against converged simulations of tests/truth/light: see physics/light/README.md
+ * @source the integrating enclosure (Walsh, Photometry), recalled; the stack of zones is ours, and stands in until surfaces exchange light one by one
+ * @accuracy in the converged simulations of tests/truth/light the mean of a lit tier within 7 %, of one lit by spill within 11 %; it knows no bright and dim places within a zone
  */
 export interface ZoneModel {
   /** Heights between which zone i lies: levels[i]…levels[i + 1]. */
   levels: number[];
   zones: Zone[];
-  surfaces: Surface[];
+  /** Of each tier, the level whose floor it is; its underside bounds the zone below. */
+  levelOf: Map<SceneSlab, number>;
 }
 
 interface Zone {
@@ -27,56 +30,19 @@ interface Zone {
   areaM2: number;
   /** Σ ρ A of what bounds it, m². */
   reflectingM2: number;
+  /** Lamps' faces among it, which throw nothing back, m². */
+  facesM2: number;
   /** Openings to the zone above and below, m². */
   upM2: number;
   downM2: number;
 }
 
-interface Surface {
-  zone: number;
-  reflectance: number;
-  normal: Vec3;
-  patches: { at: Vec3; areaM2: number }[];
-}
-
-/** Patches are about this wide: fine enough for a share of flux, coarse enough to be cheap. */
-const PATCH_M = 0.3;
-const MOST_PATCHES = 8;
 /** Tiers whose tops are closer than this are one level. */
 const LEVEL_M = 0.05;
-/** Just off the surface, so that a patch does not lie in the plane of the slab that it belongs to. */
-const OFF_M = 1e-6;
 
-interface Sheet {
-  zone: number;
-  reflectance: number;
-  normal: Vec3;
-  corner: Vec3;
-  u: Vec3;
-  v: Vec3;
-}
-
-function sheetSurface({ zone, reflectance, normal, corner, u, v }: Sheet, share = 1): Surface {
-  const lu = Math.hypot(...u);
-  const lv = Math.hypot(...v);
-  const nu = Math.min(MOST_PATCHES, Math.max(2, Math.ceil(lu / PATCH_M)));
-  const nv = Math.min(MOST_PATCHES, Math.max(2, Math.ceil(lv / PATCH_M)));
-  const patches = [];
-  for (let i = 0; i < nu; i += 1) {
-    for (let j = 0; j < nv; j += 1) {
-      const a = (i + 0.5) / nu;
-      const b = (j + 0.5) / nv;
-      const at = [0, 1, 2].map((k) => corner[k]! + a * u[k]! + b * v[k]! + OFF_M * normal[k]!) as unknown as Vec3;
-      patches.push({ at, areaM2: ((lu * lv) / (nu * nv)) * share });
-    }
-  }
-  return { zone, reflectance, normal, patches };
-}
-
-const solidShare = (slab: SceneSlab) => 1 - slab.openFraction;
-const slabArea = (slab: SceneSlab) => (slab.x1 - slab.x0) * (slab.y1 - slab.y0) * solidShare(slab);
-const undersideOf = (slab: SceneSlab) => slab.zTop - (slab.openFraction > 0 ? 0 : slab.thickness);
-const lowerReflectance = (slab: SceneSlab) => (slab.openFraction > 0 ? slab.reflectanceTop : slab.reflectanceBottom);
+const solidM2 = (slab: SceneSlab) => (slab.x1 - slab.x0) * (slab.y1 - slab.y0) * (1 - slab.openFraction);
+export const lowerReflectance = (slab: SceneSlab): number =>
+  slab.openFraction > 0 ? slab.reflectanceTop : slab.reflectanceBottom;
 
 /** Groups the tiers into levels, from the floor up. */
 function groupLevels(slabs: readonly SceneSlab[]): SceneSlab[][] {
@@ -89,32 +55,32 @@ function groupLevels(slabs: readonly SceneSlab[]): SceneSlab[][] {
   return groups;
 }
 
-function wallSurfaces({ tent }: LightScene, zone: number, z0: number, z1: number): Surface[] {
-  const { width, depth, reflectance } = tent;
-  const h = z1 - z0;
-  const walls: Omit<Sheet, 'zone'>[] = [
-    { reflectance: reflectance.xMin, normal: [1, 0, 0], corner: [0, 0, z0], u: [0, depth, 0], v: [0, 0, h] },
-    { reflectance: reflectance.xMax, normal: [-1, 0, 0], corner: [width, 0, z0], u: [0, depth, 0], v: [0, 0, h] },
-    { reflectance: reflectance.yMin, normal: [0, 1, 0], corner: [0, 0, z0], u: [width, 0, 0], v: [0, 0, h] },
-    { reflectance: reflectance.yMax, normal: [0, -1, 0], corner: [0, depth, z0], u: [width, 0, 0], v: [0, 0, h] },
-  ];
-  return walls.map((wall) => sheetSurface({ ...wall, zone }));
+function bound(zone: Zone, areaM2: number, reflectance: number): void {
+  zone.areaM2 += areaM2;
+  zone.reflectingM2 += areaM2 * reflectance;
 }
 
-function slabSurface(slab: SceneSlab, zone: number, face: 'top' | 'bottom'): Surface {
-  const top = face === 'top';
-  const z = top ? slab.zTop : undersideOf(slab);
-  return sheetSurface(
-    {
-      zone,
-      reflectance: top ? slab.reflectanceTop : lowerReflectance(slab),
-      normal: [0, 0, top ? 1 : -1],
-      corner: [slab.x0, slab.y0, z],
-      u: [slab.x1 - slab.x0, 0, 0],
-      v: [0, slab.y1 - slab.y0, 0],
-    },
-    solidShare(slab),
-  );
+const wallMean = ({ xMin, xMax, yMin, yMax }: FaceReflectance, width: number, depth: number) =>
+  ((xMin + xMax) * depth + (yMin + yMax) * width) / (2 * (width + depth));
+
+/** A pipe's or a reservoir's sides count to each zone that it passes, its ends to where they lie. */
+function addBox(model: Pick<ZoneModel, 'levels' | 'zones'>, { min, max, reflectance }: SceneBox): void {
+  const [w, d] = [max[0] - min[0], max[1] - min[1]];
+  model.zones.forEach((zone, i) => {
+    const h = Math.min(max[2], model.levels[i + 1]!) - Math.max(min[2], model.levels[i]!);
+    if (h > 0) bound(zone, 2 * (w + d) * h, reflectance);
+  });
+  for (const z of [min[2], max[2]]) bound(model.zones[zoneAt(model.levels, z)]!, w * d, reflectance);
+}
+
+/** A lamp's face and bare back absorb; its body reflects a share. */
+function addBody({ levels, zones }: Pick<ZoneModel, 'levels' | 'zones'>, lamp: Emitter): void {
+  const { face, bodyThicknessM } = lamp;
+  if (!face) return;
+  const zone = zones[zoneAt(levels, lamp.position[2])]!;
+  bound(zone, face.areaM2, 0);
+  zone.facesM2 += face.areaM2;
+  bound(zone, face.areaM2 + 2 * (face.lengthM + face.widthM) * bodyThicknessM, lamp.bodyReflectance);
 }
 
 /** Builds the zones of a scene. Independent of the lamps but for their bodies, which absorb. */
@@ -123,82 +89,31 @@ export function createZoneModel(scene: LightScene, emitters: readonly Emitter[])
   const groups = groupLevels(scene.slabs);
   const levels = [0, ...groups.map((group) => group[0]!.zTop), height];
   const plan = width * depth;
-  const surfaces: Surface[] = [];
-  const zones: Zone[] = [];
-  for (let i = 0; i + 1 < levels.length; i += 1) {
-    const below = groups[i - 1] ?? [];
-    const above = groups[i] ?? [];
-    const top = i + 2 === levels.length;
-    const z1 = top ? height : Math.max(levels[i]!, Math.min(...above.map(undersideOf)));
-    const own = [
-      ...wallSurfaces(scene, i, levels[i]!, z1),
-      ...below.map((slab) => slabSurface(slab, i, 'top')),
-      ...above.map((slab) => slabSurface(slab, i, 'bottom')),
-    ];
-    const flat = { zone: i, u: [width, 0, 0] as Vec3, v: [0, depth, 0] as Vec3 };
-    if (i === 0)
-      own.push(sheetSurface({ ...flat, reflectance: reflectance.floor, normal: [0, 0, 1], corner: [0, 0, 0] }));
-    if (top)
-      own.push(sheetSurface({ ...flat, reflectance: reflectance.ceiling, normal: [0, 0, -1], corner: [0, 0, height] }));
-    const solid = (group: readonly SceneSlab[]) =>
-      Math.min(
-        plan,
-        group.reduce((sum, slab) => sum + slabArea(slab), 0),
-      );
-    const zone: Zone = {
-      areaM2: 0,
-      reflectingM2: 0,
-      upM2: top ? 0 : plan - solid(above),
-      downM2: i === 0 ? 0 : plan - solid(below),
-    };
-    for (const surface of own) {
-      const areaM2 = surface.patches.reduce((sum, patch) => sum + patch.areaM2, 0);
-      zone.areaM2 += areaM2;
-      zone.reflectingM2 += areaM2 * surface.reflectance;
+  const openM2 = groups.map((group) => Math.max(0, plan - group.reduce((sum, slab) => sum + solidM2(slab), 0)));
+  const zones = levels.slice(1).map((top, i): Zone => {
+    const zone = { areaM2: 0, reflectingM2: 0, facesM2: 0, upM2: openM2[i] ?? 0, downM2: openM2[i - 1] ?? 0 };
+    bound(zone, 2 * (width + depth) * (top - levels[i]!), wallMean(reflectance, width, depth));
+    for (const slab of groups[i - 1] ?? []) bound(zone, solidM2(slab), slab.reflectanceTop);
+    for (const slab of groups[i] ?? []) {
+      bound(zone, solidM2(slab), lowerReflectance(slab));
+      const edgeM2 = 2 * (slab.x1 - slab.x0 + slab.y1 - slab.y0) * (slab.zTop - undersideOf(slab));
+      bound(zone, edgeM2, slab.reflectanceEdge);
     }
+    if (i === 0) bound(zone, plan, reflectance.floor);
+    if (i === levels.length - 2) bound(zone, plan, reflectance.ceiling);
     zone.areaM2 += zone.upM2 + zone.downM2;
-    zones.push(zone);
-    surfaces.push(...own);
-  }
-  for (const lamp of emitters) if (lamp.face) addBody(zones[zoneAt(levels, lamp.position[2])]!, lamp, lamp.face);
-  return { levels, zones, surfaces };
-}
-
-/** A lamp's face and bare back absorb; its body reflects a share. */
-function addBody(zone: Zone, lamp: Emitter, face: NonNullable<Emitter['face']>): void {
-  const bodyM2 = face.areaM2 + 2 * (face.lengthM + face.widthM) * lamp.bodyThicknessM;
-  zone.areaM2 += face.areaM2 + bodyM2;
-  zone.reflectingM2 += bodyM2 * lamp.bodyReflectance;
+    return zone;
+  });
+  const levelOf = new Map(groups.flatMap((group, i) => group.map((slab) => [slab, i + 1] as const)));
+  for (const box of scene.boxes) addBox({ levels, zones }, box);
+  for (const lamp of emitters) addBody({ levels, zones }, lamp);
+  return { levels, zones, levelOf };
 }
 
 export function zoneAt(levels: readonly number[], z: number): number {
   let zone = 0;
   while (zone + 2 < levels.length && z >= levels[zone + 1]! - 1e-9) zone += 1;
   return zone;
-}
-
-export interface FirstBounce {
-  /** Photon flux that the zone's surfaces throw back, for a lamp of 1 µmol/s. */
-  reflected: Float64Array;
-  /** … and that they take in. */
-  absorbed: number;
-}
-
-/** Where one lamp's direct light lands. The flux is scaled so that none is lost to the coarseness of the patches. */
-export function firstBounce(model: ZoneModel, lamp: Emitter, occluders: readonly Occluder[]): FirstBounce {
-  const reflected = new Float64Array(model.zones.length);
-  const one: Emitter = { ...lamp, ppf: 1 };
-  let landed = 0;
-  let absorbed = 0;
-  for (const surface of model.surfaces) {
-    let flux = 0;
-    for (const patch of surface.patches) flux += directPpfd(patch.at, surface.normal, one, occluders) * patch.areaM2;
-    landed += flux;
-    reflected[surface.zone]! += flux * surface.reflectance;
-    absorbed += flux * (1 - surface.reflectance);
-  }
-  if (landed === 0) return { reflected, absorbed: 1 };
-  return { reflected: reflected.map((flux) => flux / landed), absorbed: absorbed / landed };
 }
 
 /**
@@ -220,6 +135,11 @@ export function solveZones(model: ZoneModel, reflected: ArrayLike<number>): Floa
   }
   for (let i = n - 2; i >= 0; i -= 1) level[i]! += upper[i]! * level[i + 1]!;
   return level;
+}
+
+/** What a leaf gets for each µmol/m²/s of its zone's level, of whose sky lamps' faces take up a share. */
+export function seenOfLevel({ areaM2, facesM2 }: Zone, faces: number): number {
+  return Math.max(0, 1 - faces) / (1 - facesM2 / areaM2);
 }
 
 /** What the zones' surfaces absorb at these levels, µmol/s. */
