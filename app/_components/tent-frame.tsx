@@ -33,7 +33,6 @@ function namesOf({ gardenId, tent, scenarioId, scenarios, page }: TentFrameProps
   const name = (words: string, key: TentPage, href: string): PageName => ({ words, href, current: page === key });
   return [
     name('Section', 'section', at),
-    name('Light', 'light', `${at}/light`),
     name('Climate', 'climate', `${at}/climate`),
     name('Power', 'power', `${at}/power`),
     name('Compare', 'compare', `/gardens/${gardenId}/compare?ids=${ids.join(',')}&base=${scenarioId}`),
