@@ -6,8 +6,8 @@ import { buttonLook } from './button-look';
 interface TextLinkProps {
   href: string;
   children: ReactNode;
-  /** `does`: solid rule; `opens`: dotted rule; `quiet`: words in a list of names; `button`: the page's one way on. */
-  look?: 'does' | 'opens' | 'quiet' | 'button';
+  /** `does`: solid rule; `opens`: dotted rule; `quiet`: words in a list of names; `plain`: no look of its own; `button`: the page's one way on. */
+  look?: 'does' | 'opens' | 'quiet' | 'plain' | 'button';
   strong?: boolean;
   className?: string;
   'aria-current'?: 'page';
@@ -17,6 +17,7 @@ const LOOKS = {
   does: 'link-does inline-flex items-center min-h-6',
   opens: 'link-opens text-ink',
   quiet: 'text-ink-soft hover:text-ink',
+  plain: '',
   button: buttonLook('solid'),
 } as const;
 

@@ -46,7 +46,7 @@ export function PageFrame(props: PageFrameProps) {
   return (
     <div className="mx-auto min-h-dvh max-w-360 px-18 max-lg:px-8 max-md:px-4">
       <header className="grid grid-cols-[196px_1fr_auto] gap-x-6 border-b border-line pt-6 max-lg:grid-cols-[1fr_auto] max-md:pt-4 print:hidden">
-        <TextLink href="/gardens" look="quiet" className="text-17 font-semibold text-ink max-lg:hidden">
+        <TextLink href="/gardens" look="plain" className="text-17 font-semibold max-lg:hidden">
           Cellarsun
         </TextLink>
         <Trail trail={trail} />

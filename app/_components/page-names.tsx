@@ -17,8 +17,8 @@ export function PageNames({ names, className }: { names: readonly PageName[]; cl
         <TextLink
           key={name.words}
           href={name.href}
-          look="quiet"
-          className={`inline-flex min-h-8 touch-44 items-center border-b-[3px] pt-1 pb-1.5 text-14 ${name.current ? 'border-b-lamp font-semibold text-ink' : 'border-b-transparent'}`}
+          look="plain"
+          className={`inline-flex min-h-8 touch-44 items-center border-b-[3px] pt-1 pb-1.5 text-14 ${name.current ? 'border-b-lamp font-semibold' : 'border-b-transparent text-ink-soft hover:text-ink'}`}
           {...(name.current && { 'aria-current': 'page' as const })}
         >
           {name.words}
