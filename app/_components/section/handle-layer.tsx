@@ -29,8 +29,8 @@ interface HandleLayerProps {
 }
 
 const GRAB = 44;
-/** The ring of the focus is drawn on the handle itself: 2 px, square, one pixel off. */
-const FOCUS = 'outline-none focus-visible:[stroke:var(--lamp)] focus-visible:[stroke-width:2]';
+/** The page's own focus ring fits a handle too. */
+const FOCUS = 'outline-lamp';
 
 export function HandleLayer(props: HandleLayerProps) {
   const { model } = props;

@@ -9,7 +9,7 @@ import { isSelected } from './plan-edit';
 import type { SectionContext } from './section-context';
 import { DAYS_IN_MONTH } from '@/lib/scenarios/coldest-month';
 import { textWidthPx } from '../chart/label-stair';
-import { MONTHS } from './year-ledger';
+import { MONTHS } from './month-names';
 
 const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left text-ink';
 

@@ -22,7 +22,7 @@ import { StepperRow } from './stepper-row';
 import { useOpenFields } from './use-open-fields';
 import { useSection } from './use-section';
 import { ViewChoice } from './view-choice';
-import { MONTHS } from './year-ledger';
+import { MONTHS } from './month-names';
 
 interface NarrowStageProps extends StageProps {
   widthPx: number;

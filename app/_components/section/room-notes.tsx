@@ -10,7 +10,7 @@ import { Explainable } from '../explain';
 import { Num } from '../num';
 import { Verb } from './inspector';
 import type { SectionContext } from './section-context';
-import { MONTHS } from './year-ledger';
+import { MONTHS } from './month-names';
 
 const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left';
 

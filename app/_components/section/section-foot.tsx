@@ -7,7 +7,8 @@ import { figureText } from '@/lib/format/figure';
 import { Explainable } from '../explain';
 import { Num } from '../num';
 import type { SectionContext } from './section-context';
-import { MONTHS, YearLedger } from './year-ledger';
+import { MONTHS } from './month-names';
+import { YearLedger } from './year-ledger';
 
 export interface Bill {
   month: number;

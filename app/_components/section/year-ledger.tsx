@@ -1,6 +1,7 @@
 /** Twelve months as stacked bars: heater hatched on top, lamps plain, fan and pump at the foot. */
 import { patternFill, Patterns } from '../chart/patterns';
 import type { Evaluation } from '@/lib/evaluation/evaluate-scenario';
+import { MONTHS } from './month-names';
 import { px } from './section-frame';
 
 interface YearLedgerProps {
@@ -14,20 +15,6 @@ interface YearLedgerProps {
 }
 
 const LETTERS = ['J', 'F', 'M', 'A', 'M', 'J', 'J', 'A', 'S', 'O', 'N', 'D'];
-export const MONTHS = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-];
 
 export function YearLedger({ months, widthPx, heightPx, toldMonth, id, empty }: YearLedgerProps) {
   const bar = Math.max(10, (widthPx / 12) * 0.57);

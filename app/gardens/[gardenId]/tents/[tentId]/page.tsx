@@ -13,7 +13,7 @@ export default async function TentPage({ params }: { params: Promise<{ gardenId:
   const path = `/gardens/${gardenId}/tents/${tentId}`;
   const actor = await getGardenActor(gardenId).catch(() => null);
   if (!actor) {
-    if (!(await getActor())) redirect(`/sign-in?next=${encodeURIComponent(path)}` as Route);
+    if (!(await getActor())) redirect(`/sign-in?callbackUrl=${encodeURIComponent(path)}` as Route);
     notFound();
   }
   const scenarioId = await currentScenario();

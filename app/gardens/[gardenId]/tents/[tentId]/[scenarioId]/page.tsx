@@ -21,7 +21,9 @@ async function load(params: Awaited<SectionPageProps['params']>): Promise<Evalua
   const actor = await getGardenActor(gardenId).catch(() => null);
   if (!actor) {
     if (!(await getActor()))
-      redirect(`/sign-in?next=${encodeURIComponent(`/gardens/${gardenId}/tents/${tentId}/${scenarioId}`)}` as Route);
+      redirect(
+        `/sign-in?callbackUrl=${encodeURIComponent(`/gardens/${gardenId}/tents/${tentId}/${scenarioId}`)}` as Route,
+      );
     notFound();
   }
   try {

@@ -45,7 +45,10 @@ export function CropField({ gardenId, chosen, target, disabled, onChoose }: Crop
         label="What grows here"
         value={chosen?.crop ?? NONE}
         disabled={disabled}
-        options={[{ value: NONE, label: 'Nothing yet' }, ...[...stages.keys()].map((crop) => ({ value: crop, label: crop }))]}
+        options={[
+          { value: NONE, label: 'Nothing yet' },
+          ...[...stages.keys()].map((crop) => ({ value: crop, label: crop })),
+        ]}
         onChange={(crop) => onChoose(crop === NONE ? null : { crop, stage: usual(crop) })}
       />
       {chosen && stageNames.length > 1 && (

@@ -14,7 +14,8 @@ import type { Tent } from '@/lib/tents/tent.schema';
 
 /** The crop reference is the same for everybody and changes only with a new release. */
 export function useCropReference(): CropStage[] | undefined {
-  return useQuery({ queryKey: ['crops'], queryFn: () => apiGet<CropStage[]>('/api/v1/crops'), staleTime: Infinity }).data;
+  return useQuery({ queryKey: ['crops'], queryFn: () => apiGet<CropStage[]>('/api/v1/crops'), staleTime: Infinity })
+    .data;
 }
 
 /** Targets of the plan's crops: those that came with the page, and for crops chosen since, the garden's own or the reference. */
