@@ -68,16 +68,17 @@ function landOn(solid: Solid, z: number, rising: boolean, model: ZoneModel): { z
   return { zone: level - 1, reflectance: slab.reflectanceEdge };
 }
 
+function land(into: FirstBounce, zone: number, reflectance: number, share: number): void {
+  into.reflected[zone]! += share * reflectance;
+  into.absorbed += share * (1 - reflectance);
+}
+
 /** Follows one ray to where it ends, leaving at each mesh the share that the mesh stops. */
 function follow(target: Target, from: Vec3, way: Vec3, weight: number, into: FirstBounce): void {
   const { scene, model, solids } = target;
   const wall = wallAhead(scene, from, way);
   const whole: Vec3 = [way[0] * wall.reach, way[1] * wall.reach, way[2] * wall.reach];
   const least = wall.reach > 0 ? TOUCH_M / wall.reach : 1;
-  const land = (zone: number, reflectance: number, share: number) => {
-    into.reflected[zone]! += share * reflectance;
-    into.absorbed += share * (1 - reflectance);
-  };
   let passed = least;
   let left = weight;
   for (;;) {
@@ -93,10 +94,10 @@ function follow(target: Target, from: Vec3, way: Vec3, weight: number, into: Fir
         hit = solid;
       }
     }
-    if (!hit) return land(zoneAt(model.levels, from[2] + whole[2]), wall.reflectance, left);
+    if (!hit) return land(into, zoneAt(model.levels, from[2] + whole[2]), wall.reflectance, left);
     const place = landOn(hit, from[2] + nearest * whole[2], way[2] > 0, model);
     const stopped = left * hit.occluder.stops;
-    land(place.zone, place.reflectance, stopped);
+    land(into, place.zone, place.reflectance, stopped);
     left -= stopped;
     if (left <= 0) return;
     passed = nearest;
@@ -140,6 +141,23 @@ function fanOf(lamp: Emitter): Ray[] {
   return rays;
 }
 
+/** Where on the face a ray starts; the edge of a face that pokes through the fabric shines from the fabric. */
+function startOf({ u, v }: Ray, { position, axis, side }: Emitter, ends: Vec3): Vec3 {
+  return [
+    Math.min(ends[0], Math.max(0, position[0] + u * axis[0] + v * side[0])),
+    Math.min(ends[1], Math.max(0, position[1] + u * axis[1] + v * side[1])),
+    Math.min(ends[2], Math.max(0, position[2] + u * axis[2] + v * side[2])),
+  ];
+}
+
+function wayOf({ along, across, cos }: Ray, { aim, axis, side }: Emitter): Vec3 {
+  return [
+    along * axis[0] + across * side[0] + cos * aim[0],
+    along * axis[1] + across * side[1] + cos * aim[1],
+    along * axis[2] + across * side[2] + cos * aim[2],
+  ];
+}
+
 /**
  * Where one lamp's direct light lands, by an even fan of rays past tiers and boxes. No photon is lost. Other lamps' bodies
  * are left out: they hide little of it, and so a lamp that is moved leaves the others' fans as they are.
@@ -148,18 +166,12 @@ function fanOf(lamp: Emitter): Ray[] {
  */
 export function firstBounce(target: Target, lamp: Emitter): FirstBounce {
   const into: FirstBounce = { reflected: new Float64Array(target.model.zones.length), absorbed: 0 };
-  const { aim, axis, side, position } = lamp;
-  const ends = [target.scene.tent.width, target.scene.tent.depth, target.scene.tent.height];
-  for (const { cos, along, across, u, v, weight } of fanOf(lamp)) {
-    if (weight === 0) continue;
-    if (lamp.face && cos <= 0) {
-      into.absorbed += weight;
-      continue;
-    }
-    const mix = (a: number, s: number, h: number, k: number) => a * axis[k]! + s * side[k]! + h * aim[k]!;
-    const start = (k: number) => Math.min(ends[k]!, Math.max(0, position[k]! + mix(u, v, 0, k)));
-    const way = (k: number) => mix(along, across, cos, k);
-    follow(target, [start(0), start(1), start(2)], [way(0), way(1), way(2)], weight, into);
+  const { tent } = target.scene;
+  const ends: Vec3 = [tent.width, tent.depth, tent.height];
+  for (const ray of fanOf(lamp)) {
+    if (ray.weight === 0) continue;
+    if (lamp.face && ray.cos <= 0) into.absorbed += ray.weight;
+    else follow(target, startOf(ray, lamp, ends), wayOf(ray, lamp), ray.weight, into);
   }
   return into;
 }

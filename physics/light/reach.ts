@@ -20,23 +20,17 @@ export function extentOf(points: readonly Vec3[] | Float64Array): Extent {
 }
 
 /** How far an extent reaches along a direction. */
-function reachAlong({ low, high }: Extent, [x, y, z]: Vec3): number {
-  return (x > 0 ? high[0] : low[0]) * x + (y > 0 ? high[1] : low[1]) * y + (z > 0 ? high[2] : low[2]) * z;
+function reachAlong({ low, high }: Extent, x: number, y: number, z: number): number {
+  return x * (x > 0 ? high[0] : low[0]) + y * (y > 0 ? high[1] : low[1]) + z * (z > 0 ? high[2] : low[2]);
 }
 
-/** True when a plane square to the direction has the box on one side and both extents on the other. */
-function parts(direction: Vec3, box: Extent, a: Extent, b: Extent): boolean {
-  const back: Vec3 = [-direction[0], -direction[1], -direction[2]];
-  const near = (way: Vec3, away: Vec3) =>
-    -reachAlong(box, away) >= Math.max(reachAlong(a, way), reachAlong(b, way)) - 1e-9;
-  return near(direction, back) || near(back, direction);
+/** True when a plane square to the direction has the body on one side and both extents on the other. */
+function parted(x: number, y: number, z: number, body: Extent, a: Extent, b: Extent): boolean {
+  const high = Math.max(reachAlong(a, x, y, z), reachAlong(b, x, y, z));
+  if (-reachAlong(body, -x, -y, -z) >= high - 1e-9) return true;
+  const low = -Math.max(reachAlong(a, -x, -y, -z), reachAlong(b, -x, -y, -z));
+  return reachAlong(body, x, y, z) <= low + 1e-9;
 }
-
-const FACES: readonly Vec3[] = [
-  [1, 0, 0],
-  [0, 1, 0],
-  [0, 0, 1],
-];
 
 /**
  * False when a body cannot stand between a lamp and any of the points: some plane parts it from both. True when it may; it is
@@ -45,20 +39,19 @@ const FACES: readonly Vec3[] = [
  * @param aim of a face; null for a point, which may shine to all sides
  */
 export function mayHide(body: Occluder, lamp: Extent, points: Extent, aim: Vec3 | null): boolean {
-  for (const face of FACES) if (parts(face, body, lamp, points)) return false;
+  if (parted(0, 0, 1, body, lamp, points) || parted(1, 0, 0, body, lamp, points)) return false;
+  if (parted(0, 1, 0, body, lamp, points)) return false;
   // Nothing behind the face's own plane hides its light.
-  if (aim && reachAlong(body, aim) <= -reachAlong(lamp, [-aim[0], -aim[1], -aim[2]]) + 1e-9) return false;
-  for (let i = 0; i < 3; i += 1) {
-    const j = (i + 1) % 3;
-    for (let corner = 0; corner < 4; corner += 1) {
-      const pick = (extent: Extent, k: number, upper: boolean) => (upper ? extent.high[k]! : extent.low[k]!);
-      const di = pick(points, i, (corner & 1) > 0) - pick(lamp, i, (corner & 1) > 0);
-      const dj = pick(points, j, (corner & 2) > 0) - pick(lamp, j, (corner & 2) > 0);
-      const normal: [number, number, number] = [0, 0, 0];
-      normal[i] = -dj;
-      normal[j] = di;
-      if ((di !== 0 || dj !== 0) && parts(normal, body, lamp, points)) return false;
-    }
+  if (aim && reachAlong(body, aim[0], aim[1], aim[2]) <= -reachAlong(lamp, -aim[0], -aim[1], -aim[2]) + 1e-9)
+    return false;
+  // Along the edges of the hull of the two extents, as seen along x, y and z.
+  for (let corner = 0; corner < 8; corner += 1) {
+    const dx = (corner & 1 ? points.high : points.low)[0] - (corner & 1 ? lamp.high : lamp.low)[0];
+    const dy = (corner & 2 ? points.high : points.low)[1] - (corner & 2 ? lamp.high : lamp.low)[1];
+    const dz = (corner & 4 ? points.high : points.low)[2] - (corner & 4 ? lamp.high : lamp.low)[2];
+    if (parted(-dy, dx, 0, body, lamp, points)) return false;
+    if (parted(0, -dz, dy, body, lamp, points)) return false;
+    if (parted(dz, 0, -dx, body, lamp, points)) return false;
   }
   return true;
 }
