@@ -1,0 +1,23 @@
+import type { Metadata, Route } from 'next';
+import { redirect } from 'next/navigation';
+import { PageFrame } from '@/app/_components/page-frame';
+import { getActor } from '@/lib/auth/session';
+import { NewGardenForm } from './_components/new-garden-form';
+
+export const metadata: Metadata = { title: 'A new garden' };
+
+export default async function NewGardenPage({ searchParams }: { searchParams: Promise<{ keep?: string }> }) {
+  const { keep } = await searchParams;
+  const actor = await getActor();
+  if (!actor) redirect('/sign-in?callbackUrl=/gardens/new' as Route);
+  const keeping = keep === 'drawing';
+  return (
+    <PageFrame
+      crumbs={[{ words: 'Your gardens', href: '/gardens' }, { words: 'a new garden' }]}
+      headline={keeping ? 'Your drawing gets a garden to stand in.' : 'A garden of your own.'}
+      lead="You are its owner. Nobody else sees it until you give them a code."
+    >
+      <NewGardenForm keeping={keeping} units={actor.unitSystem} />
+    </PageFrame>
+  );
+}
