@@ -42,7 +42,7 @@ export const uprightBox = ({ low, high, stops = 1 }: { low: Vec3; high: Vec3; st
   });
 
 /** Faces closer than this to the eye or to the lamp do not hide it: they are the same surface. */
-const TOUCH_M = 1e-7;
+export const TOUCH_M = 1e-11;
 /** At most 3 near faces and 6 silhouette edges. */
 export const MOST_SHADOW_PLANES = 9;
 const local = new Float64Array(3);
@@ -80,7 +80,7 @@ export function shadowPlanes(box: Occluder, px: number, py: number, pz: number, 
     planes[at] = -side * e[0];
     planes[at + 1] = -side * e[1];
     planes[at + 2] = -side * e[2];
-    planes[at + 3] = hi - side * li - TOUCH_M;
+    planes[at + 3] = hi - side * li;
     at += 4;
     for (let step = 1; step <= 2; step += 1) {
       const j = (i + step) % 3;

@@ -1,5 +1,5 @@
 import { clip, cornerBuffer } from './polygon-clip';
-import { MOST_SHADOW_PLANES, shadowPlanes, type Occluder } from './occluder';
+import { MOST_SHADOW_PLANES, shadowPlanes, TOUCH_M, type Occluder } from './occluder';
 
 /** What is summed over the convex pieces of a polygon that the eye sees; corners are measured from the eye. */
 export type Measure = (corners: Float64Array, count: number) => number;
@@ -24,7 +24,7 @@ const OUT = -1;
 const CUT = 0;
 const IN = 1;
 
-/** Where a polygon lies of a half-space. */
+/** Where a polygon lies of a half-space. One that lies in its edge is out: a box does not hide its own face. */
 function sideOf(corners: Float64Array, count: number, planes: Float64Array, at: number): number {
   const a = planes[at]!;
   const b = planes[at + 1]!;
@@ -34,8 +34,8 @@ function sideOf(corners: Float64Array, count: number, planes: Float64Array, at: 
   let without = false;
   for (let i = 0; i < count * 3; i += 3) {
     const reach = a * corners[i]! + b * corners[i + 1]! + c * corners[i + 2]! + d;
-    if (reach > 0) within = true;
-    else if (reach < 0) without = true;
+    if (reach > TOUCH_M) within = true;
+    else if (reach < -TOUCH_M) without = true;
     if (within && without) return CUT;
   }
   return within ? IN : OUT;
