@@ -67,7 +67,7 @@ export function inFront(
  * @param except a box that hides nothing here: the lamp's own body
  * @returns 0…1
  * @source [Lambert1760] polygon formula; [Howell] C-13 gives the same for a rectangle parallel to the receiver
- * @accuracy rounding only, about 1e-13
+ * @accuracy rounding only, about 1e-14
  */
 export function viewFactor(
   point: Vec3,
