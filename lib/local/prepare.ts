@@ -2,6 +2,8 @@
 import { closePools } from '../db/client';
 import { migrateToLatest, roleOf } from '../db/migrate';
 import { refuseUnsafeRole } from '../db/refuse-unsafe-role';
+import { seedDemo } from '../demo/seed-demo';
+import { referenceData } from '../reference-data/reference-data';
 
 const need = (name: string): string => {
   const value = process.env[name];
@@ -17,6 +19,15 @@ async function prepare(): Promise<void> {
   });
   console.log(ran.length === 0 ? 'schema up to date' : `${ran.length} migrations ran`);
   await refuseUnsafeRole();
+  const { crops, colours } = referenceData();
+  console.log(`reference data checked: ${crops.length} crops and stages, ${colours.length} spectra`);
+  if (process.argv.includes('--demo')) await loadDemo();
+}
+
+async function loadDemo(): Promise<void> {
+  const { loaded, signIns } = await seedDemo();
+  console.log(loaded === 0 ? 'demo there already' : `${loaded} demo gardens loaded`);
+  for (const { email, passphrase, what } of signIns) console.log(`sign-in ${email}, “${passphrase}”: ${what}`);
 }
 
 try {
