@@ -65,6 +65,6 @@ export interface LeaderRequest {
 }
 
 export function leader({ side, fromPx, toPx, bendPx }: LeaderRequest): Leader {
-  const between = side === 'left' ? Math.min(bendPx, toPx[0]) : Math.max(bendPx, toPx[0]);
+  const between = side === 'left' ? Math.min(bendPx, toPx[0] - 10) : Math.max(bendPx, toPx[0] + 10);
   return { points: [fromPx, [between, fromPx[1]], toPx], dot: toPx };
 }

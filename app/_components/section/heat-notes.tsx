@@ -89,7 +89,7 @@ export function heaterNote(context: SectionContext): NoteBlock[] {
       node: chosen ? <Inspector context={context} /> : <HeaterWords context={context} short={selection !== null} />,
       estimatePx: chosen ? 330 : 74,
       wantedTopPx: tent.y1 - 128,
-      toPx: heater ? [(heater.box.x0 + heater.box.x1) / 2, heater.box.y0 + 1] : null,
+      toPx: heater ? [heater.box.x0 + 1, heater.box.y0 + 14] : null,
       selected: chosen,
     },
   ];

@@ -80,11 +80,23 @@ export function Verb({ onClick, children, danger }: { onClick: () => void; child
   );
 }
 
+/** What is changed seldom stays folded until it is wanted. */
+export function More({ words, children }: { words: string; children: ReactNode }) {
+  return (
+    <details>
+      <summary className="min-h-6 touch-44 cursor-pointer list-none text-12 link-opens [&::-webkit-details-marker]:hidden">
+        {words}
+      </summary>
+      <div className="flex flex-col gap-1.5 pt-1">{children}</div>
+    </details>
+  );
+}
+
 /** Two fields that lie side by side in the world lie side by side here. */
 export function Pair({ children }: { children: ReactNode }) {
   return (
-    <div className="flex gap-2">
-      {Children.map(children, (child) => child && <div className="min-w-0 flex-1">{child}</div>)}
+    <div className="grid grid-cols-[5fr_6fr] gap-2">
+      {Children.map(children, (child) => child && <div className="min-w-0">{child}</div>)}
     </div>
   );
 }

@@ -20,7 +20,7 @@ import { CheckField } from '../check-field';
 import { QuantityField } from '../quantity-field';
 import { SelectField } from '../select-field';
 import { ClockField } from './clock-field';
-import { InspectorFrame, Pair, Verb } from './inspector';
+import { InspectorFrame, More, Pair, Verb } from './inspector';
 import { groupOf, type LampGroup } from './lamp-groups';
 import type { PlanChange } from './plan-edit';
 import type { SectionContext } from './section-context';
@@ -79,36 +79,38 @@ export function LampFields({ context, lampId }: LampFieldsProps) {
           onCommit={(onAt) => change('on')((plan) => setLampSchedule(plan, ids, { onAt }))}
         />
         <QuantityField
-          label="For"
+          label="For, and off at"
           kind="hours"
           value={group.hours}
           min={0}
           max={24}
           disabled={edit.readOnly !== null}
-          derived={`to ${offAt(group.onAt, group.hours)}`}
+          derived={offAt(group.onAt, group.hours)}
           onCommit={(hours) => change('hours')((plan) => setLampSchedule(plan, ids, { hours }))}
         />
       </Pair>
-      <Pair>
-        {context.fixtures.length > 1 && (
-          <SelectField
-            label="Which lamp"
-            value={group.fixture.id}
-            disabled={edit.readOnly !== null}
-            options={context.fixtures.map((fixture) => ({ value: fixture.id, label: fixture.name ?? 'Lamp' }))}
-            onChange={(fixture) => change('fixture')((plan) => setLampFixture(plan, ids, fixture))}
-          />
-        )}
-        {doc.tiers.length > 1 && (
-          <SelectField
-            label="Lights"
-            value={group.tier?.id ?? ''}
-            disabled={edit.readOnly !== null}
-            options={doc.tiers.map((tier) => ({ value: tier.id, label: words.tier(tier.id) }))}
-            onChange={(tier) => change('tier')((plan) => setLampTier(plan, ids, tier))}
-          />
-        )}
-      </Pair>
+      {(context.fixtures.length > 1 || doc.tiers.length > 1) && (
+        <More words="Another lamp, or another tier">
+          {context.fixtures.length > 1 && (
+            <SelectField
+              label="Which lamp"
+              value={group.fixture.id}
+              disabled={edit.readOnly !== null}
+              options={context.fixtures.map((fixture) => ({ value: fixture.id, label: fixture.name ?? 'Lamp' }))}
+              onChange={(fixture) => change('fixture')((plan) => setLampFixture(plan, ids, fixture))}
+            />
+          )}
+          {doc.tiers.length > 1 && (
+            <SelectField
+              label="Lights"
+              value={group.tier?.id ?? ''}
+              disabled={edit.readOnly !== null}
+              options={doc.tiers.map((tier) => ({ value: tier.id, label: words.tier(tier.id) }))}
+              onChange={(tier) => change('tier')((plan) => setLampTier(plan, ids, tier))}
+            />
+          )}
+        </More>
+      )}
       <TogetherField context={context} group={group} lampId={lampId} />
     </InspectorFrame>
   );

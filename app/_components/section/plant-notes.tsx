@@ -59,6 +59,7 @@ export function TierNote({ context, tier, verdict, short, compact }: TierNotePro
   const id = tier.tier.id;
   const isWorst = worst === id;
   const sites = tier.tier.sites;
+  const named = context.slots.cropNames?.[id];
   const offered = waysTier === id && !edit.held ? ways : [];
   return (
     <div>
@@ -66,7 +67,11 @@ export function TierNote({ context, tier, verdict, short, compact }: TierNotePro
         <button type="button" className={dotted} onClick={() => select({ kind: 'tier', id })}>
           {words.tier(id)}
         </button>
-        {verdict?.crop ? `: ${verdict.crop}, ${verdict.stage}` : ': no crop chosen'}
+        {verdict?.crop
+          ? `: ${verdict.crop}, ${verdict.stage}`
+          : named
+            ? `: ${named}; no light is known for it yet`
+            : ': no crop chosen'}
         {sites && !compact ? `, ${sites.rows * sites.columns} sites` : ''}
       </p>
       {verdict && (

@@ -48,7 +48,12 @@ export function AddWords({ context }: { context: SectionContext }) {
   const { doc, edit, select, worst, slots, fixtures } = context;
   const [choosing, setChoosing] = useState(false);
   if (edit.readOnly !== null) return <p className="text-12 text-ink-soft">{edit.readOnly}</p>;
-  const tierId = context.selection?.kind === 'tier' ? context.selection.id : (worst ?? doc.tiers[0]?.id ?? null);
+  const dark = context.model.tiers.find(
+    ({ tier }) => !context.model.groups.some((group) => group.tier?.id === tier.id),
+  );
+  const chosen = context.selection?.kind === 'tier' ? context.selection.id : null;
+  // The shelf that is chosen, else the highest without a lamp, else the one that misses most.
+  const tierId = chosen ?? dark?.tier.id ?? worst ?? doc.tiers[0]?.id ?? null;
   const hang = (fixture: string) => {
     const positionM = placeForLamp(doc, tierId ?? '');
     const id = freshId('lamp', doc.placements);
@@ -105,13 +110,14 @@ export function CircuitWords({ context, left }: { context: SectionContext; left?
   return (
     <ul className={`text-12 text-ink-soft ${left ? '' : 'text-right'}`}>
       {(evaluation?.circuits ?? []).map((circuit) => {
-        const rating = doc.power.circuits.find((each) => each.id === circuit.id)?.ratingA ?? 0;
+        const known = doc.power.circuits.find((each) => each.id === circuit.id);
+        const others = (known?.otherLoadsW ?? 0) / doc.power.supplyV;
         return (
           <li key={circuit.id}>
             <span className="font-semibold text-slate">
-              {names?.[circuit.id] ?? 'Circuit'}, {rating} A
+              {names?.[circuit.id] ?? 'Circuit'}, {known?.ratingA ?? 0} A
             </span>
-            :{' '}
+            : {others > 0.05 ? `this tent ${Math.max(0, circuit.continuousA - others).toFixed(1)} A, in all ` : ''}
             <Explainable path={`circuits.${circuit.id}.continuous`}>
               <Num text={circuit.continuousA.toFixed(1)} />
             </Explainable>{' '}

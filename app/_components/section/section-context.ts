@@ -17,6 +17,8 @@ export interface SectionSlots {
   /** Goes to the lamps of the garden. */
   fixturesLink?: ReactNode;
   setTent?: ((patch: Partial<TentBody>) => void) | undefined;
+  /** Crop and stage of tiers whose light nobody knows. */
+  cropNames?: Readonly<Record<string, string>> | undefined;
   circuitNames?: Readonly<Record<string, string>> | undefined;
   /** Every lamp that could be hung; left out: those of the document. */
   fixtures?: ScenarioDocument['fixtures'] | undefined;

@@ -45,7 +45,9 @@ export function SectionStage({
   left,
   footEnd,
 }: SectionStageProps) {
-  const [ref, widthPx] = useWidth<HTMLDivElement>(initialWidthPx);
+  const [ref, measuredPx] = useWidth<HTMLDivElement>(initialWidthPx);
+  // Narrower than any screen there is: a page that is being laid out or printed.
+  const widthPx = Math.max(320, measuredPx);
   const [view, setView] = useState<SectionView>('front');
   const state = useSectionState(initialSelection ?? null);
   const explaining = useExplain().open !== null;

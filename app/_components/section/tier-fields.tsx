@@ -6,7 +6,7 @@ import { planDefault } from '@/lib/scenarios/plan-defaults';
 import { QuantityField } from '../quantity-field';
 import { TextField } from '../text-field';
 import { useState } from 'react';
-import { InspectorFrame, Pair, Verb } from './inspector';
+import { InspectorFrame, More, Pair, Verb } from './inspector';
 import type { SectionContext } from './section-context';
 
 interface TierFieldsProps {
@@ -72,23 +72,25 @@ export function TierFields({ context, tierId }: TierFieldsProps) {
         onCommit={(canopyHeightM) => patch({ canopyHeightM }, 'canopy')}
       />
       <SitesFields tier={tier} disabled={locked} onCommit={(sites) => patch({ sites }, 'sites')} />
-      <DefaultField
-        label="Leaf area for each area of tray"
-        kind="ratio"
-        value={tier.leafAreaIndex}
-        defaultKey="tier.leafAreaIndex"
-        min={0}
-        max={12}
-        disabled={locked}
-        onCommit={(leafAreaIndex) => patch({ leafAreaIndex }, 'leaf area')}
-      />
-      <NameField
-        key={tier.name ?? ''}
-        name={tier.name ?? ''}
-        placeName={words.tier(tierId)}
-        disabled={locked}
-        onCommit={(name) => patch({ name: name || undefined }, 'name')}
-      />
+      <More words="Leaf area, name">
+        <DefaultField
+          label="Leaf area for each area of tray"
+          kind="ratio"
+          value={tier.leafAreaIndex}
+          defaultKey="tier.leafAreaIndex"
+          min={0}
+          max={12}
+          disabled={locked}
+          onCommit={(leafAreaIndex) => patch({ leafAreaIndex }, 'leaf area')}
+        />
+        <NameField
+          key={tier.name ?? ''}
+          name={tier.name ?? ''}
+          placeName={words.tier(tierId)}
+          disabled={locked}
+          onCommit={(name) => patch({ name: name || undefined }, 'name')}
+        />
+      </More>
     </InspectorFrame>
   );
 }

@@ -22,12 +22,14 @@ export function TierPart({ model, section, hatchId, selected, hours, band, befor
   return (
     <g aria-hidden="true">
       <StripPart model={model} tentRightPx={section.tent.x1} hours={hours} band={band} before={before} />
-      <g stroke="var(--moss)" strokeWidth={0.9}>
-        <path d={plants.stems} fill="none" strokeWidth={1.4} />
-        <path d={plants.back} fill="var(--leaf-back)" />
-        <path d={plants.front} fill="var(--leaf)" />
-        <path d={plants.veins} fill="none" strokeWidth={0.55} strokeOpacity={0.8} />
-      </g>
+      {model.tier.target && (
+        <g stroke="var(--moss)" strokeWidth={0.9}>
+          <path d={plants.stems} fill="none" strokeWidth={1.4} />
+          <path d={plants.back} fill="var(--leaf-back)" />
+          <path d={plants.front} fill="var(--leaf)" />
+          <path d={plants.veins} fill="none" strokeWidth={0.55} strokeOpacity={0.8} />
+        </g>
+      )}
       <path d={plants.pots} fill="var(--sheet)" stroke="var(--ink)" strokeWidth={1.1} />
       <rect
         x={px(shelf.x0)}

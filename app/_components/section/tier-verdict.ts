@@ -75,7 +75,7 @@ export function verdictFigure({ verdict, dli, low, high }: TierVerdict): string 
 export function verdictWords(verdict: TierVerdict): string {
   const { low, high, crop } = verdict;
   const figure = (value: number) => String(Number(value.toFixed(1)));
-  if (low === null || high === null) return ' mol a day; no crop is chosen';
+  if (low === null || high === null) return ' mol a day';
   if (verdict.verdict === 'below') return ` of the ${figure(low)} mol it needs`;
   if (verdict.verdict === 'above') return ` mol a day, above ${crop}’s ${figure(low)} to ${figure(high)}`;
   return ` mol a day, inside ${crop}’s ${figure(low)} to ${figure(high)}`;

@@ -1,21 +1,24 @@
 'use client';
 
-import { useEffect, useState } from 'react';
-import {
-  createLightCache,
-  evaluateScenario,
-  type Evaluation,
-  type ScenarioDocument,
-} from '@/lib/evaluation/evaluate-scenario';
-import { heightsInside, waysOut, type Evaluate, type WayOut } from '@/lib/scenarios/ways-out';
+import { useEffect, useRef, useState } from 'react';
+import type { Evaluation, ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
+import { askWays, type WaysHelper } from '@/lib/scenarios/ways-out.hooks';
+import type { WayOut } from '@/lib/scenarios/ways-out';
 import { lampRange } from '@/lib/scenarios/lamp-range';
 
 const QUIET_MS = 350;
-const pause = () => new Promise<void>((resolve) => setTimeout(resolve, 0));
 
-function trial(): Evaluate {
-  const lightCache = createLightCache();
-  return (doc, { year }) => evaluateScenario(doc, { year, lightCache });
+/** One helper for as long as the part is on the page. */
+function useHelper() {
+  const helper = useRef<WaysHelper | null>(null);
+  useEffect(() => {
+    helper.current = askWays();
+    return () => {
+      helper.current?.end();
+      helper.current = null;
+    };
+  }, []);
+  return helper;
 }
 
 /** Ways out for the tier that most wants one, tried in the quiet after the last change. */
@@ -25,25 +28,17 @@ export function useWays(
   tierId: string | null,
   quiet: boolean,
 ): { ways: readonly WayOut[]; tierId: string | null } {
-  const [evaluate] = useState(trial);
+  const helper = useHelper();
   const [found, setFound] = useState<{ doc: ScenarioDocument; tierId: string; ways: WayOut[] } | null>(null);
   useEffect(() => {
     if (!quiet || !evaluation || !tierId) return;
-    const stop = new AbortController();
-    const timer = window.setTimeout(async () => {
-      try {
-        const ways = await waysOut(doc, evaluation, tierId, { evaluate, pause, signal: stop.signal });
-        if (!stop.signal.aborted) setFound({ doc, tierId, ways });
-      } catch {
-        // A trial that the physics refuses is no way out.
-        if (!stop.signal.aborted) setFound({ doc, tierId, ways: [] });
-      }
+    const timer = window.setTimeout(() => {
+      helper.current?.ask({ kind: 'ways', document: doc, evaluation, tierId }, ({ ways }) =>
+        setFound({ doc, tierId, ways }),
+      );
     }, QUIET_MS);
-    return () => {
-      stop.abort();
-      window.clearTimeout(timer);
-    };
-  }, [doc, evaluation, tierId, quiet, evaluate]);
+    return () => window.clearTimeout(timer);
+  }, [doc, evaluation, tierId, quiet, helper]);
   const current = found && found.doc === doc && found.tierId === tierId ? found : null;
   return { ways: current?.ways ?? [], tierId: current?.tierId ?? null };
 }
@@ -61,22 +56,16 @@ export function useRail(
   ids: readonly string[],
   tierId: string | null,
 ): Rail | null {
-  const [evaluate] = useState(trial);
+  const helper = useHelper();
   const [rail, setRail] = useState<{ before: ScenarioDocument; rail: Rail } | null>(null);
   const key = ids.join();
   useEffect(() => {
     if (!before || !lampId || !tierId) return;
     const lamps = key.split(',');
     const range = lampRange(before, lamps);
-    const timer = window.setTimeout(() => {
-      try {
-        const insideM = heightsInside(before, { lamps, tierId, ...range, evaluate });
-        setRail({ before, rail: { ...range, insideM } });
-      } catch {
-        setRail({ before, rail: { ...range, insideM: null } });
-      }
-    }, 60);
-    return () => window.clearTimeout(timer);
-  }, [before, lampId, tierId, key, evaluate]);
+    helper.current?.ask({ kind: 'rail', document: before, lamps, tierId, ...range }, ({ insideM }) =>
+      setRail({ before, rail: { ...range, insideM } }),
+    );
+  }, [before, lampId, tierId, key, helper]);
   return rail && rail.before === before ? rail.rail : null;
 }

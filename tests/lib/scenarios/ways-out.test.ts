@@ -1,10 +1,13 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { createLightCache, evaluateScenario } from '@/lib/evaluation/evaluate-scenario';
 import { toldMonth } from '@/lib/scenarios/coldest-month';
 import { setLampOutput } from '@/lib/scenarios/edit-plan';
 import { lampAcrossRange, lampRange, placeForLamp } from '@/lib/scenarios/lamp-range';
 import { applyWayOut, heightsInside, waysOut, type Evaluate } from '@/lib/scenarios/ways-out';
 import { twoTierTent as doc } from '../../app/section/two-tier-tent';
+
+// Each way is priced by whole years: seconds, not milliseconds, on a busy machine.
+vi.setConfig({ testTimeout: 60_000 });
 
 const lightCache = createLightCache();
 const evaluate: Evaluate = (document, { year }) => evaluateScenario(document, { year, lightCache });

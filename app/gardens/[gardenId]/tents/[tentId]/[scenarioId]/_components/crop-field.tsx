@@ -19,6 +19,12 @@ interface CropFieldProps {
 
 const NONE = '';
 
+/** Who says so, without the whole citation: that stands on the crops page. */
+function shortSource(source: string): string {
+  const head = source.split(/[,.(:]/)[0]!.trim();
+  return head.length > 40 ? `${head.slice(0, 39)}…` : `${head}.`;
+}
+
 /** Crop first, then its stage; the garden's own crops stand among those of the reference. */
 export function CropField({ gardenId, chosen, target, disabled, onChoose }: CropFieldProps) {
   const reference = useCropReference();
@@ -64,13 +70,13 @@ export function CropField({ gardenId, chosen, target, disabled, onChoose }: Crop
         <p className="text-12 text-ink-soft" key={targetKey(chosen)}>
           {target ? (
             <>
-              <StandingMark standing={target.standing} /> {target.source}{' '}
+              <StandingMark standing={target.standing} />: {shortSource(target.source)}{' '}
             </>
           ) : (
             'No light is known for this stage yet. '
           )}
           <TextLink href={`/gardens/${gardenId}/crops`} look="opens">
-            Set our own
+            Its figures, and our own
           </TextLink>
         </p>
       )}

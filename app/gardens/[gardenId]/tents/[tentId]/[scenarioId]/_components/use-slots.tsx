@@ -3,6 +3,7 @@
 /** What the scenario's rows add to the section: crops, lamps of the garden, circuits' names, the tent's body, clashes. */
 import { useMemo } from 'react';
 import { TextLink } from '@/app/_components/link';
+import { shortCrop } from '@/app/_components/section/tier-verdict';
 import type { SectionSlots } from '@/app/_components/section/section-context';
 import { targetKey, type ResolvedTarget, type TargetRef } from '@/lib/crops/crop.schema';
 import type { ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
@@ -60,6 +61,11 @@ export function useSlots({ workbench, editor, documentOf, targets, setTent }: Sl
     };
     return {
       cropField,
+      cropNames: Object.fromEntries(
+        settled.tiers.flatMap(({ id, targetRef }) =>
+          targetRef ? [[id, `${shortCrop(targetRef.crop)}, ${targetRef.stage}`]] : [],
+        ),
+      ),
       fixtures: allFixtures,
       fixturesLink: (
         <TextLink href={`/gardens/${gardenId}/fixtures`} look="opens">
