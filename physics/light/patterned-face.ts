@@ -11,9 +11,21 @@ const PART_OF_DISTANCE = 0.7;
 const LEAST_SCALE_RAD = 0.06;
 const MOST_HALVINGS = 14;
 
-/** Gauss and Legendre's three points on −1…1. */
-const GAUSS_AT = [-Math.sqrt(0.6), 0, Math.sqrt(0.6)];
-const GAUSS_WEIGHT = [5 / 18, 8 / 18, 5 / 18];
+interface Points {
+  at: readonly number[];
+  weight: readonly number[];
+}
+
+/** Gauss and Legendre's points on −1…1, exact to the first, third and fifth degree. */
+const ONE: Points = { at: [0], weight: [1] };
+const TWO: Points = { at: [-Math.sqrt(1 / 3), Math.sqrt(1 / 3)], weight: [0.5, 0.5] };
+const THREE: Points = { at: [-Math.sqrt(0.6), 0, Math.sqrt(0.6)], weight: [5 / 18, 8 / 18, 5 / 18] };
+/** Up to this share of the widest a part may be, one or two points across it do as well as three on the widest. */
+const ONE_DOES = 0.04;
+const TWO_DO = 0.4;
+
+const pointsAcross = (share: number): Points => (share < ONE_DOES ? ONE : share < TWO_DO ? TWO : THREE);
+
 /** Radon's seven points on a triangle, exact to the fifth degree: weight and the three shares of the corners. */
 const RADON: readonly (readonly [number, number, number, number])[] = [
   [0.225, 1 / 3, 1 / 3, 1 / 3],
@@ -83,16 +95,19 @@ function overPolygon(corners: Float64Array, count: number): number {
   return sum;
 }
 
-function overRectangle(u: number, v: number, halfU: number, halfV: number): number {
+function overRectangle(u: number, v: number, halfU: number, halfV: number, distance: number): number {
   const { axis, side, aim } = lamp;
+  const most = wide * distance;
+  const across = pointsAcross((2 * halfU) / most);
+  const down = pointsAcross((2 * halfV) / most);
   let sum = 0;
-  for (let i = 0; i < 3; i += 1) {
-    const du = u + GAUSS_AT[i]! * halfU - eyeU;
-    for (let j = 0; j < 3; j += 1) {
-      const dv = v + GAUSS_AT[j]! * halfV - eyeV;
+  for (let i = 0; i < across.at.length; i += 1) {
+    const du = u + across.at[i]! * halfU - eyeU;
+    for (let j = 0; j < down.at.length; j += 1) {
+      const dv = v + down.at[j]! * halfV - eyeV;
       sum +=
-        GAUSS_WEIGHT[i]! *
-        GAUSS_WEIGHT[j]! *
+        across.weight[i]! *
+        down.weight[j]! *
         arrives(
           du * axis[0] + dv * side[0] - eyeH * aim[0],
           du * axis[1] + dv * side[1] - eyeH * aim[1],
@@ -103,8 +118,8 @@ function overRectangle(u: number, v: number, halfU: number, halfV: number): numb
   return 4 * halfU * halfV * sum;
 }
 
-function overPart(point: Vec3, normal: Vec3, u: number, v: number, halfU: number, halfV: number): number {
-  if (clear) return overRectangle(u, v, halfU, halfV);
+function overPart(point: Vec3, normal: Vec3, u: number, v: number, halfU: number, halfV: number, d: number): number {
+  if (clear) return overRectangle(u, v, halfU, halfV, d);
   const { position, axis, side } = lamp;
   for (let corner = 0; corner < 4; corner += 1) {
     const at = u + (corner === 0 || corner === 3 ? -halfU : halfU);
@@ -137,7 +152,7 @@ function overFace(
   const distance = Math.sqrt(offU * offU + offV * offV + eyeH * eyeH);
   if (outsideBeam(u, v, halfU, halfV, distance)) return 0;
   if (halvings === 0 || 2 * Math.max(halfU, halfV) <= wide * distance)
-    return overPart(point, normal, u, v, halfU, halfV);
+    return overPart(point, normal, u, v, halfU, halfV, distance);
   const left = halvings - 1;
   if (halfU >= halfV) {
     const half = halfU / 2;
@@ -154,10 +169,9 @@ function overFace(
 /**
  * PPFD for a photon flux of 1 from a face that has a pattern of its own: E = 1/A ∫ i(γ, C) cos θ/r² dA over what is seen.
  *
- * The face is halved until each part is small against its distance and against the beam; a part that is seen whole takes nine
- * points, one that is cut is cut exactly and takes seven a triangle.
+ * The face is halved until each part is small against its distance and against the beam; a part that is seen whole takes up to
+ * nine points, one that is cut is cut exactly and takes seven a triangle.
  *
- * @param whole the face as the eye sees it, in front of the eye's horizon, with `count` corners
  * @accuracy 2e-4 of the plane's mean; 2e-3 where a table has a cliff
  */
 export function patternedFace(
