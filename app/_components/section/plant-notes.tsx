@@ -127,12 +127,12 @@ function Stray({ verdict, id }: { verdict: TierVerdict; id: string }) {
 
 function Before({ now, before, held }: { now: TierVerdict; before: TierVerdict | undefined; held: boolean }) {
   if (!held || !before) return null;
-  const moved = Math.abs(before.dli - now.dli) >= 0.05;
-  const even = Math.abs(before.evenness - now.evenness) >= 0.005;
+  const moved = verdictFigure(before) !== verdictFigure(now);
+  const even = before.evenness.toFixed(2) !== now.evenness.toFixed(2);
   if (!moved && !even) return <p className="text-12 text-ink-soft">Unchanged by this move.</p>;
   return (
     <p className="text-14">
-      {moved ? `Was ${before.dli.toFixed(1)} before you moved it.` : ''}
+      {moved ? `Was ${verdictFigure(before)} before you moved it.` : ''}
       {even ? ` Evenness ${now.evenness.toFixed(2)}, was ${before.evenness.toFixed(2)}.` : ''}
     </p>
   );
