@@ -1,4 +1,4 @@
-import { DomainError } from '../domain-error';
+import { DomainError, requireWithin } from '../domain-error';
 import type { Distribution } from './light-documents';
 
 /**
@@ -64,9 +64,48 @@ type Table = Extract<Distribution, { type: 'table' }>;
 const rowsOf = ({ intensity }: Table): number[][] =>
   Array.isArray(intensity[0]) ? (intensity as number[][]) : [intensity as number[]];
 
+function requireRising(quantity: string, values: readonly number[], max: number): void {
+  values.forEach((value, i) =>
+    requireWithin({ quantity, value, min: i === 0 ? 0 : values[i - 1]! + 1e-9, max, unit: '°' }),
+  );
+}
+
+function requireTable(table: Table): void {
+  const { gammaDeg, cDeg } = table;
+  const rows = rowsOf(table);
+  requireWithin({ quantity: 'number of angles of a table', value: gammaDeg.length, min: 2, max: 721, unit: '' });
+  requireRising('angle from the axis in a table', gammaDeg, 180);
+  if (rows.length > 1) {
+    const planes = cDeg?.length ?? 0;
+    requireWithin({ quantity: 'number of C-planes', value: planes, min: rows.length, max: rows.length, unit: '' });
+    requireRising('C-angle of a table', cDeg!, 360);
+    const last = cDeg!.at(-1)!;
+    if (![90, 180, 360].includes(last))
+      throw new DomainError({
+        quantity: 'last C-angle of a table',
+        value: last,
+        min: 90,
+        max: 360,
+        unit: '°: 90, 180 or 360',
+      });
+  }
+  for (const row of rows) {
+    const wanted = gammaDeg.length;
+    requireWithin({
+      quantity: 'number of intensities of a plane',
+      value: row.length,
+      min: wanted,
+      max: wanted,
+      unit: '',
+    });
+    for (const value of row) requireWithin({ quantity: 'intensity in a table', value, min: 0, max: 1e12, unit: '' });
+  }
+}
+
 const angleOf = (cos: number) => Math.acos(cos > 1 ? 1 : cos < -1 ? -1 : cos);
 
 function tableIntensity(table: Table): Intensity {
+  requireTable(table);
   const gammaRad = table.gammaDeg.map((gamma) => gamma * RAD);
   const first = gammaRad[0]! - 1e-12;
   const beyond = gammaRad.at(-1)! + 1e-12;

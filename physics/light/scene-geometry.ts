@@ -24,11 +24,15 @@ function requireTent({ tent }: LightScene): void {
     requireWithin({ quantity: `reflectance of ${face}`, value, min: 0, max: 0.99, unit: '' });
 }
 
+/** What sums of decimals leave over is no distance. */
+const ROUNDING_M = 1e-9;
+
 function requireInside({ position, id }: Emitter, { tent }: LightScene): void {
-  const ends = [tent.width, tent.depth, tent.height];
-  position.forEach((value, i) =>
-    requireWithin({ quantity: `${'xyz'[i]} of lamp ${id}`, value, min: 0, max: ends[i]!, unit: 'm' }),
-  );
+  [tent.width, tent.depth, tent.height].forEach((max, i) => {
+    const value = position[i]!;
+    const snapped = Math.abs(value) < ROUNDING_M ? 0 : Math.abs(value - max) < ROUNDING_M ? max : value;
+    requireWithin({ quantity: `${'xyz'[i]} of lamp ${id}`, value: snapped, min: 0, max, unit: 'm' });
+  });
 }
 
 export function prepareScene(scene: LightScene): SceneGeometry {

@@ -135,8 +135,33 @@ describe('intensity of a lamp by direction', () => {
     exact.forEach((gamma, i) => expect(Math.sin(gamma) ** 2).toBeCloseTo((i + 0.5) / 50, 12));
   });
 
-  it('refuses beams below 5° and over 170°, and a table of nothing', () => {
+  it('refuses beams below 5° and over 170°, and tables that are no table', () => {
     for (const beamAngleDeg of [4.9, 171, NaN]) expect(() => cosinePowerOf(beamAngleDeg)).toThrow(DomainError);
-    expect(() => intensityOf({ type: 'table', gammaDeg: [0, 90], intensity: [0, 0] })).toThrow(DomainError);
+    const bad: Distribution[] = [
+      { type: 'table', gammaDeg: [0, 90], intensity: [0, 0] },
+      { type: 'table', gammaDeg: [0, 90], intensity: [1, -1] },
+      { type: 'table', gammaDeg: [0, 90], intensity: [1, 1, 1] },
+      { type: 'table', gammaDeg: [0, 60, 50], intensity: [1, 1, 1] },
+      { type: 'table', gammaDeg: [0, 190], intensity: [1, 1] },
+      {
+        type: 'table',
+        gammaDeg: [0, 90],
+        cDeg: [0, 120],
+        intensity: [
+          [1, 0],
+          [1, 1],
+        ],
+      },
+      {
+        type: 'table',
+        gammaDeg: [0, 90],
+        cDeg: [0],
+        intensity: [
+          [1, 0],
+          [1, 1],
+        ],
+      },
+    ];
+    for (const distribution of bad) expect(() => intensityOf(distribution)).toThrow(DomainError);
   });
 });
