@@ -116,7 +116,8 @@ export function tentState({ tent, room, source, tempC, airflowM3H }: StateInput)
   const toKgS = 1 / (3600 * room.volumePerKg);
 
   const allowedPa = (tent.maxRelHumidityPct / 100) * saturationPa;
-  const allowedRatio = humidityRatio({ vapourPa: allowedPa, pressurePa });
+  // Near the boiling point even this humidity would be all vapour: no air need be changed for it.
+  const allowedRatio = allowedPa < pressurePa ? humidityRatio({ vapourPa: allowedPa, pressurePa }) : Infinity;
   const atLimit = Math.max(0, line.still - line.slope * allowedPa);
   const moistureAirflowM3H =
     atLimit === 0 ? 0 : allowedRatio > room.ratio ? atLimit / (allowedRatio - room.ratio) / toKgS : null;
