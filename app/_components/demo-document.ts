@@ -11,7 +11,7 @@ export const demoDocument: ScenarioDocument = {
       kind: 'monthly',
       values: [12.4, 12.1, 12.6, 13.6, 15.1, 16.7, 17.9, 18.2, 17.1, 15.4, 13.8, 12.8],
     },
-    relHumidityPct: { kind: 'constant', value: 66 },
+    relHumidityPct: { kind: 'constant', value: 60 },
   },
   tent: { widthM: 1.2, depthM: 0.9, heightM: 1.8 },
   tiers: [
@@ -26,7 +26,7 @@ export const demoDocument: ScenarioDocument = {
       canopyHeightM: 0.16,
       sites: { rows: 3, columns: 6 },
       target: {
-        crop: 'Basil',
+        crop: 'Basil, sweet',
         stage: 'production',
         dliLowMolM2D: 9.3,
         dliTargetMolM2D: 12.9,
@@ -46,7 +46,7 @@ export const demoDocument: ScenarioDocument = {
       canopyHeightM: 0.13,
       sites: { rows: 3, columns: 5 },
       target: {
-        crop: 'Butterhead lettuce',
+        crop: 'Lettuce, butterhead/leaf',
         stage: 'production',
         dliLowMolM2D: 12,
         dliTargetMolM2D: 14.4,
@@ -118,7 +118,7 @@ export const demoDocument: ScenarioDocument = {
     nightTempC: 16,
     maxTempC: 27,
     heater: { ratedPowerW: 300 },
-    exhaust: { maxAirflowM3H: 180, inputPowerW: 18 },
+    exhaust: { maxAirflowM3H: 180, minAirflowM3H: 25, inputPowerW: 18 },
   },
   water: {
     reservoirL: 40,

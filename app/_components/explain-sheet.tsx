@@ -93,7 +93,12 @@ function TermFigure({ term, follow }: { term: ExplanationTerm; follow: () => voi
   const { figure } = explainedFigure(term.value, term.unit, useUnits());
   if (!term.path) return <Num text={figure} />;
   return (
-    <button type="button" className="link-opens [font:inherit]" onClick={follow} title="How it comes about">
+    <button
+      type="button"
+      className="cursor-pointer border-b border-dotted border-ink-soft [font:inherit]"
+      onClick={follow}
+      title="How it comes about"
+    >
       <Num text={figure} />
     </button>
   );

@@ -69,7 +69,7 @@ export function Explainable({ path, children }: ExplainableProps) {
       aria-expanded={isOpen}
       aria-controls={isOpen ? 'explain-sheet' : undefined}
       title="How it comes about"
-      className={`inline cursor-pointer text-left [font:inherit] ${isOpen ? 'outline-2 outline-offset-2 outline-lamp' : 'underline decoration-ink-soft decoration-dotted decoration-1 underline-offset-[0.25em]'}`}
+      className={`inline cursor-pointer text-left [font:inherit] ${isOpen ? 'outline-2 outline-offset-2 outline-lamp' : 'border-b border-dotted border-ink-soft'}`}
       onClick={() => (isOpen ? state.close() : state.show(path))}
     >
       {children}

@@ -44,7 +44,7 @@ export function FieldFrame({
   const errorId = `${id}error`;
   const described = [error && errorId, hint && hintId, ...(describedBy ?? [])].filter(Boolean).join(' ');
   return (
-    <div className={`w-53.5 max-w-full ${className ?? ''}`}>
+    <div className={`max-w-full ${/(^|\s)w-/.test(className ?? '') ? '' : 'w-53.5'} ${className ?? ''}`}>
       <div className={hideLabel ? 'sr-only' : 'flex items-baseline justify-between gap-3 pb-0.5'}>
         <label htmlFor={id} className="text-12 text-ink-soft">
           {label}

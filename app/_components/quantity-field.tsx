@@ -72,7 +72,7 @@ export function QuantityField(props: QuantityFieldProps) {
                 inputMode="text"
                 autoComplete="off"
                 spellCheck={false}
-                className="col-start-1 row-start-1 w-full min-w-0 bg-transparent outline-none"
+                className="col-start-1 row-start-1 w-0 min-w-full bg-transparent outline-none"
                 value={typed.text}
                 disabled={disabled}
                 aria-invalid={typed.problem !== null || undefined}

@@ -80,7 +80,7 @@ export function TentFrame(props: TentFrameProps) {
       </header>
       <main id="main" tabIndex={-1} className={`outline-none ${wide ? '' : edge}`}>
         {headline && (
-          <h1 className="max-w-[46rem] pt-7 text-34 font-light text-balance max-md:pt-5 max-md:text-30">{headline}</h1>
+          <h1 className="max-w-[46rem] pt-7 text-34 font-light text-pretty max-md:pt-5 max-md:text-30">{headline}</h1>
         )}
         {lead && <p className="max-w-[56rem] pt-2 text-17 max-md:text-14">{lead}</p>}
         {props.children}

@@ -58,7 +58,7 @@ export function useTypedQuantity({ kind, value, onCommit, onClear, min, max, who
     /** The unit stands in the field unless the person types one. */
     showsUnit: !/[a-zµ°%'"′″/]/i.test(text),
     unit: formatQuantity(0, kind, units).unit,
-    standing: value === null || value === undefined ? null : formatQuantity(value, kind, units).text,
+    standing: stands === '' ? null : `${stands}\u00a0${formatQuantity(0, kind, units).unit}`.trim(),
     type: (next: string) => setTyped({ text: next, over: value, editing: true, problem: null }),
     commit,
     restore: () => setTyped(null),

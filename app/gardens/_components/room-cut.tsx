@@ -3,6 +3,7 @@ import { Figure } from '@/app/_components/figure';
 import { TextLink } from '@/app/_components/link';
 import { VerdictMark } from '@/app/_components/verdict-mark';
 import type { RoomOverview, TentShown } from './shown';
+import { countWords } from './tent-words';
 import { TentPlace } from './tent-place';
 
 interface RoomCutProps {
@@ -64,7 +65,6 @@ function TentColumn({
   const { tent: row, document: doc } = overview;
   const base = `/gardens/${gardenId}/tents/${row.tentId}/${row.currentScenarioId ?? ''}`;
   const column = { '--at': at + 1 } as CSSProperties;
-  const lampCount = doc.placements.length;
   return (
     <>
       <div
@@ -82,8 +82,7 @@ function TentColumn({
             {row.name}
           </TextLink>{' '}
           <span className="text-ink-soft">
-            {doc.tiers.length === 1 ? 'one tier' : `${doc.tiers.length} tiers`},{' '}
-            {lampCount === 1 ? 'one lamp' : `${lampCount} lamps`}
+            {countWords(doc.tiers.length, 'tier', 'tiers')}, {countWords(doc.placements.length, 'lamp', 'lamps')}
           </span>
         </h4>
         <p className="max-w-[24rem]">

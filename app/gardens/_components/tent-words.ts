@@ -160,9 +160,16 @@ export function tentWords(doc: ScenarioDocument, evaluation: Evaluation, name: s
       return result ? [[tier.id, tierVerdict(tier, result)] as const] : [];
     }),
   );
+  // Heat and damp of a tent that is not furnished yet say nothing.
   const open = unfinished(each);
-  const found = [open, open ? null : aboutLight(each, verdicts), aboutCautions(each)].filter((one) => one !== null);
+  if (open) return open;
+  const found = [aboutLight(each, verdicts), aboutCautions(each)].filter((one) => one !== null);
   return found.sort((a, b) => b.urgency - a.urgency)[0] ?? well(each);
+}
+
+export function countWords(count: number, one: string, many: string): string {
+  if (count === 0) return `no ${one}`;
+  return `${(COUNTS[count] ?? String(count)).toLowerCase()} ${count === 1 ? one : many}`;
 }
 
 const COUNTS = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight', 'Nine'];

@@ -47,7 +47,7 @@ export function SizedTent({ sizes, tiers, onChange }: SizedTentProps) {
     />
   );
   return (
-    <div className="grid grid-cols-[118px_minmax(0,auto)_118px] gap-x-3 max-md:grid-cols-2 max-md:gap-y-4 lg:justify-start">
+    <div className="grid grid-cols-[118px_minmax(0,400px)_118px] gap-x-3 max-md:grid-cols-2 max-md:gap-y-4 lg:justify-start">
       <div className="col-start-2 pl-6 max-md:col-start-1 max-md:pl-0">{field('widthM', 'Width inside')}</div>
       <div className="max-md:col-start-2 max-md:row-start-1">{field('depthM', 'Depth inside')}</div>
       <div className="col-start-1 self-center max-md:col-span-2 max-md:self-start">
