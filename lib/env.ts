@@ -30,3 +30,8 @@ export function env(): Env {
   checked = result.data;
   return checked;
 }
+
+/** Forgets what was read, for a test that changes the environment. */
+export function resetEnv(): void {
+  checked = undefined;
+}
