@@ -1,5 +1,5 @@
-import { minorPerMajor } from '../format/money';
-import { payback, type ComparisonColumn } from './comparison';
+import type { ComparisonColumn } from './comparison';
+import { comparisonRows, type Cell } from './differences';
 
 /** A text cell that a spreadsheet would take for a formula is led by an apostrophe; quotes are doubled (RFC 4180). */
 export function csvText(text: string): string {
@@ -7,45 +7,36 @@ export function csvText(text: string): string {
   return /[",\n\r]/.test(harmless) || harmless !== text ? `"${harmless.replaceAll('"', '""')}"` : harmless;
 }
 
-const number = (value: number | null, digits = 6): string =>
-  value === null ? '' : String(Number(value.toFixed(digits)));
+/** Numbers stay numbers: a point, no thousands, as many digits as anybody could want of a plan. */
+const csvNumber = (value: number): string => (Number.isFinite(value) ? String(Number(value.toFixed(6)) + 0) : '');
+
+const csvCell = (cell: Cell): string =>
+  cell === null ? '' : typeof cell === 'number' ? csvNumber(cell) : csvText(cell);
 
 /** The comparison as a table: a row for each figure, a column for each scenario and for its difference from the baseline. */
 export function comparisonCsv(columns: readonly ComparisonColumn[], baseId: string): string {
   const base = columns.find((column) => column.scenarioId === baseId) ?? columns[0]!;
-  const head = [
-    'Figure',
-    'Unit',
-    ...columns.flatMap((column) => [column.name, ...(column === base ? [] : [`${column.name}, minus ${base.name}`])]),
-  ];
-  const lines = [head.map(csvText).join(',')];
-  const row = (figure: string, unit: string, read: (column: ComparisonColumn) => number | null) => {
-    const at = read(base);
-    const cells = columns.flatMap((column) => {
-      const value = read(column);
-      return [number(value), ...(column === base ? [] : [value === null || at === null ? '' : number(value - at)])];
-    });
-    lines.push([csvText(figure), csvText(unit), ...cells].join(','));
-  };
-  const mostTiers = Math.max(0, ...columns.map((column) => column.tiers.length));
-  for (let tier = 0; tier < mostTiers; tier += 1) {
-    const name = base.tiers[tier]?.name ?? `Tier ${tier + 1}`;
-    row(`Light, ${name}, mean`, 'mol/m²/d', (column) => column.tiers[tier]?.dliMolM2D.mean ?? null);
-    row(`Light, ${name}, lowest`, 'mol/m²/d', (column) => column.tiers[tier]?.dliMolM2D.min ?? null);
-    row(`Light, ${name}, highest`, 'mol/m²/d', (column) => column.tiers[tier]?.dliMolM2D.max ?? null);
-  }
-  row('Evenness of the least even tier', 'lowest/mean', (column) => column.evenness);
-  row('Heat on the coldest night', 'W', (column) => column.heaterNeedW);
-  row('Heater planned', 'W', (column) => column.heaterRatedW);
-  row('Money up front', base.currency, (column) => column.upFrontMinor / minorPerMajor(column.currency));
-  row('Money a month, mean', base.currency, (column) => column.costPerMonth);
-  row('Energy a year', 'kWh', (column) => column.energyKwhPerYear);
-  row('Payback', 'months', (column) => {
-    const back = payback(column, base, minorPerMajor(column.currency));
-    return back.kind === 'months' ? back.months : back.kind === 'atOnce' ? 0 : null;
+  const names = columns.flatMap((column) => [
+    column.name,
+    ...(column === base ? [] : [`${column.name}, minus ${base.name}`]),
+  ]);
+  const lines = comparisonRows(columns, base.scenarioId).map(({ figure, unit, values, differences }) => {
+    const cells = columns.flatMap((column, index) => [
+      csvCell(values[index] ?? null),
+      ...(column === base ? [] : [csvCell(differences[index] ?? null)]),
+    ]);
+    return [csvText(figure), csvText(unit), ...cells].join(',');
   });
-  base.months.forEach((_, month) =>
-    row(`Money, month ${month + 1}`, base.currency, (column) => column.months[month]!.cost),
-  );
-  return `${lines.join('\r\n')}\r\n`;
+  return [['Figure', 'Unit', ...names].map(csvText).join(','), ...lines, ''].join('\r\n');
+}
+
+/** A name that every system can hold: letters and digits of the garden's own, nothing else. */
+export function comparisonFileName(gardenName: string): string {
+  const plain = gardenName
+    .normalize('NFKD')
+    .replaceAll(/[^A-Za-z0-9]+/g, '-')
+    .replaceAll(/^-+|-+$/g, '')
+    .slice(0, 60)
+    .toLowerCase();
+  return plain ? `comparison-${plain}.csv` : 'comparison.csv';
 }

@@ -1,10 +1,11 @@
 import 'server-only';
 
 import type { GardenActor } from '../auth/session';
+import { getGarden } from '../gardens/garden.service';
 import { evaluateScenarios } from '../scenarios/evaluation.service';
 import { documentOf } from '../scenarios/garden-data';
 import { comparisonColumn, type ComparisonColumn } from './comparison';
-import { comparisonCsv } from './comparison-csv';
+import { comparisonCsv, comparisonFileName } from './comparison-csv';
 
 export interface Comparison {
   base: string;
@@ -18,7 +19,8 @@ interface Wanted {
 
 /** Scenarios of one garden side by side; an id of another garden is not found. */
 export async function compareScenarios(actor: GardenActor, { ids, base }: Wanted): Promise<Comparison> {
-  const wanted = [...new Set(ids)];
+  // The baseline is compared too, whether or not it was named again.
+  const wanted = [...new Set(base === undefined || ids.includes(base) ? ids : [base, ...ids])];
   const evaluated = await evaluateScenarios(actor, () => wanted);
   const columns = evaluated.map(({ workbench, evaluation }) =>
     comparisonColumn({
@@ -30,10 +32,12 @@ export async function compareScenarios(actor: GardenActor, { ids, base }: Wanted
       evaluation,
     }),
   );
-  return { base: base && wanted.includes(base) ? base : wanted[0]!, columns };
+  return { base: base ?? wanted[0]!, columns };
 }
 
-export async function comparisonAsCsv(actor: GardenActor, wanted: Wanted): Promise<string> {
+/** The comparison as a table to save, with a name to save it under. */
+export async function comparisonAsCsv(actor: GardenActor, wanted: Wanted): Promise<{ fileName: string; text: string }> {
   const { base, columns } = await compareScenarios(actor, wanted);
-  return comparisonCsv(columns, base);
+  const { name } = await getGarden(actor);
+  return { fileName: comparisonFileName(name), text: comparisonCsv(columns, base) };
 }

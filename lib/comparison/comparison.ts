@@ -1,3 +1,4 @@
+import { minorPerMajor } from '../format/money';
 import type { Device, Evaluation, ScenarioDocument, Verdict } from '../evaluation/evaluate-scenario';
 
 /** One scenario as a column of a comparison. */
@@ -70,14 +71,15 @@ export type Payback = { kind: 'none' } | { kind: 'atOnce' } | { kind: 'never' } 
 /**
  * When what a scenario costs more at first than the baseline comes back by what it saves each month.
  *
- * Dearer and saving: months. Not dearer and not dearer to run: at once. Dearer to run: never, whatever the light.
+ * Dearer and saving: months. Not dearer and not dearer to run: at once. Dearer to run: never, whatever the light. Alike in both,
+ * or reckoned in another currency: none.
  */
 export function payback(
-  column: Pick<ComparisonColumn, 'upFrontMinor' | 'costPerMonth'>,
-  base: Pick<ComparisonColumn, 'upFrontMinor' | 'costPerMonth'>,
-  minorPerMajor: number,
+  column: Pick<ComparisonColumn, 'upFrontMinor' | 'costPerMonth' | 'currency'>,
+  base: Pick<ComparisonColumn, 'upFrontMinor' | 'costPerMonth' | 'currency'>,
 ): Payback {
-  const more = (column.upFrontMinor - base.upFrontMinor) / minorPerMajor;
+  if (column.currency !== base.currency) return { kind: 'none' };
+  const more = (column.upFrontMinor - base.upFrontMinor) / minorPerMajor(column.currency);
   const saves = base.costPerMonth - column.costPerMonth;
   if (Math.abs(more) < 0.005 && Math.abs(saves) < 0.005) return { kind: 'none' };
   if (more <= 0) return saves >= -0.005 ? { kind: 'atOnce' } : { kind: 'never' };

@@ -30,8 +30,11 @@ export interface ResolvedTarget {
   crop: string;
   stage: string;
   target: Target;
+  /** Of the daily light, the figure that the verdict hangs on. */
   standing: Standing | 'own';
   source: string;
+  /** Of each figure by itself: they seldom come from one work. */
+  known: Partial<Record<keyof TargetFigures, { standing: Standing | 'own'; source: string }>>;
 }
 
 export interface TargetRef {

@@ -70,12 +70,11 @@ function problemOf(issue: Issue, input: unknown): DocumentProblem[] {
       value: brief(valueAt(input, issue.path)),
       range: expected?.range ?? (missing ? 'must be there' : 'see message'),
       unit: expected?.unit ?? '',
-      message:
-        missing && !expected
+      message: !issue.message.startsWith('Invalid input')
+        ? issue.message
+        : missing
           ? 'This is missing.'
-          : issue.message.startsWith('Invalid input')
-            ? 'This has the wrong form or is missing.'
-            : issue.message,
+          : 'This has the wrong form or is missing.',
     },
   ];
 }

@@ -1,9 +1,14 @@
 import 'server-only';
 
 import type { z } from 'zod';
+import { toProblems } from '../evaluation/problems';
 import { AppError, invalid, type Problem } from './app-error';
+import { parseJsonText } from './json-text';
 
 export const LARGEST_BODY_BYTES = 256 * 1024;
+
+/** What `toProblems` writes for a range where the field itself names none. */
+const UNSAID = new Set(['see message', 'must be there', 'no such key']);
 
 const tooLarge = () =>
   new AppError({
@@ -38,28 +43,17 @@ export async function readJson(request: Request): Promise<unknown> {
       detail: 'Send it with content-type: application/json.',
     });
   }
-  const text = await readText(request);
-  try {
-    return JSON.parse(text);
-  } catch {
-    throw new AppError({
-      status: 400,
-      code: 'not-json',
-      title: 'This is not JSON.',
-      detail: 'Check for a missing bracket, quote or comma. Nothing was saved.',
-    });
-  }
+  return parseJsonText(await readText(request));
 }
 
-function pathText(path: PropertyKey[]): string {
-  return path.reduce<string>(
-    (text, key) => (typeof key === 'number' ? `${text}[${key}]` : text ? `${text}.${String(key)}` : String(key)),
-    '',
-  );
-}
-
-export function problemsOf(error: z.ZodError): Problem[] {
-  return error.issues.slice(0, 50).map((issue) => ({ path: pathText(issue.path), message: issue.message }));
+/** What is wrong, field by field; where a field says what it takes, with the value, its range and its unit. */
+export function problemsOf(error: z.ZodError, input: unknown): Problem[] {
+  return toProblems(error, input)
+    .slice(0, 50)
+    .map(({ path, message, value, range, unit }) =>
+      // Only fields of a plan say a range. What stands in others, a passphrase among them, is not sent back.
+      UNSAID.has(range) ? { path, message } : { path, message, value, range, unit },
+    );
 }
 
 /** Parses with a schema; what does not fit becomes a 422 with a problem for each field. */
@@ -67,7 +61,7 @@ export function parseWith<T>(schema: z.ZodType<T> | undefined, value: unknown, o
   if (!schema) return undefined as T;
   const result = schema.safeParse(value);
   if (result.success) return result.data;
-  throw otherwise?.() ?? invalid(problemsOf(result.error));
+  throw otherwise?.() ?? invalid(problemsOf(result.error, value));
 }
 
 export function parseQuery<T>(schema: z.ZodType<T> | undefined, request: Request): T {

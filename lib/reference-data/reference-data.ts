@@ -73,7 +73,9 @@ export interface ReferencePrice {
   pricePerKwh: number;
   currency: string;
   source: string;
+  /** How it was read, in the file's own words. */
   knownHow: string;
+  standing: Standing;
 }
 
 function loadPrices(): ReferencePrice[] {
@@ -90,6 +92,8 @@ function loadPrices(): ReferencePrice[] {
         currency: american ? 'USD' : 'EUR',
         source: row['source']!,
         knownHow: row['known_how']!,
+        // Read in the work itself, unless its row says that it was quoted elsewhere.
+        standing: /secondary|repeating/.test(row['known_how']!) ? 'secondary' : 'read',
       },
     ];
   });

@@ -6,64 +6,14 @@ import { audit } from '../audit/audit';
 import { requireAllowed } from '../auth/require-allowed';
 import type { GardenActor } from '../auth/session';
 import { changedColumns } from '../db/changed-columns';
+import { requireSame } from '../db/sent-twice';
 import { inGarden, type GardenTransaction } from '../db/transactions';
-import { clash, inUse, notFoundHere } from '../http/app-error';
-import { roomInputSchema, type Room, type RoomChange, type RoomInput } from './room.schema';
-
-const columns = [
-  'garden_id',
-  'room_id',
-  'name',
-  'place',
-  'climate',
-  'power',
-  'residual_current_device',
-  'version',
-] as const;
-
-interface Row {
-  garden_id: string;
-  room_id: string;
-  name: string;
-  place: unknown;
-  climate: unknown;
-  power: unknown;
-  residual_current_device: Room['residualCurrentDevice'];
-  version: number;
-}
-
-const toRoom = (row: Row): Room => ({
-  gardenId: row.garden_id,
-  roomId: row.room_id,
-  name: row.name,
-  place: row.place as Room['place'],
-  climate: row.climate as Room['climate'],
-  power: row.power as Room['power'],
-  residualCurrentDevice: row.residual_current_device,
-  version: row.version,
-});
-
-export async function roomsOf(trx: GardenTransaction, gardenId: string): Promise<Room[]> {
-  const rows = await trx
-    .selectFrom('rooms')
-    .where('garden_id', '=', gardenId)
-    .select(columns)
-    .orderBy('created_at')
-    .orderBy('room_id')
-    .execute();
-  return rows.map(toRoom);
-}
-
-export async function roomById(trx: GardenTransaction, gardenId: string, roomId: string): Promise<Room> {
-  const row = await trx
-    .selectFrom('rooms')
-    .where('garden_id', '=', gardenId)
-    .where('room_id', '=', roomId)
-    .select(columns)
-    .executeTakeFirst();
-  if (!row) throw notFoundHere('room');
-  return toRoom(row);
-}
+import { gardenById } from '../gardens/garden.queries';
+import { clash, inUse, invalid } from '../http/app-error';
+import { requireScenariosFit } from '../scenarios/plan-fit.service';
+import { tentsOf } from '../tents/tent.queries';
+import { roomById, roomsOf } from './room.queries';
+import { roomInputSchema, type Room, type RoomChange, type RoomInput, type RoomPower } from './room.schema';
 
 export async function listRooms(actor: GardenActor): Promise<Room[]> {
   requireAllowed(actor, 'room.read');
@@ -80,6 +30,7 @@ export async function createRoom(actor: GardenActor, input: RoomInput): Promise<
   requireAllowed(actor, 'room.create');
   const { roomId = randomUUID(), residualCurrentDevice, ...rest } = roomInputSchema.parse(input);
   return inGarden(actor.gardenId, async (trx) => {
+    await requireCurrency(trx, actor.gardenId, rest.power);
     const made = await trx
       .insertInto('rooms')
       .values({
@@ -94,8 +45,30 @@ export async function createRoom(actor: GardenActor, input: RoomInput): Promise<
       .onConflict((conflict) => conflict.doNothing())
       .executeTakeFirst();
     if (made.numInsertedOrUpdatedRows) await audit(trx, { ...actor, action: 'room.create', targetId: roomId });
-    return roomById(trx, actor.gardenId, roomId);
+    const kept = await roomById(trx, actor.gardenId, roomId);
+    requireSame('roomId', { ...rest, residualCurrentDevice }, kept);
+    return kept;
   });
+}
+
+/** A garden reckons in one currency; its lamps are priced in it, and sums of two would be no sums. */
+async function requireCurrency(trx: GardenTransaction, gardenId: string, { tariff }: RoomPower): Promise<void> {
+  const garden = tariff && (await gardenById(trx, gardenId));
+  if (garden && garden.currency !== tariff.currency)
+    throw invalid([
+      {
+        path: 'power.tariff.currency',
+        message: `This garden reckons in ${garden.currency}. Give the prices in ${garden.currency}.`,
+        value: tariff.currency,
+        range: garden.currency,
+        unit: '',
+      },
+    ]);
+}
+
+async function requireTentsFit(trx: GardenTransaction, gardenId: string, room: Room): Promise<void> {
+  const tents = (await tentsOf(trx, gardenId)).filter((tent) => tent.roomId === room.roomId);
+  for (const tent of tents) await requireScenariosFit(trx, gardenId, { tent, room, path: 'climate' });
 }
 
 export async function updateRoom(
@@ -105,7 +78,11 @@ export async function updateRoom(
 ): Promise<Room> {
   requireAllowed(actor, 'room.update');
   return inGarden(actor.gardenId, async (trx) => {
-    const updated = await trx
+    const before = await roomById(trx, actor.gardenId, roomId, 'change');
+    if (before.version !== version) throw clash(before);
+    if (change.power) await requireCurrency(trx, actor.gardenId, change.power);
+    if (change.climate) await requireTentsFit(trx, actor.gardenId, { ...before, climate: change.climate });
+    await trx
       .updateTable('rooms')
       .set({
         ...changedColumns({ ...change, residual_current_device: residualCurrentDevice }),
@@ -114,10 +91,8 @@ export async function updateRoom(
       })
       .where('garden_id', '=', actor.gardenId)
       .where('room_id', '=', roomId)
-      .where('version', '=', version)
-      .executeTakeFirst();
+      .execute();
     const room = await roomById(trx, actor.gardenId, roomId);
-    if (!updated.numUpdatedRows) throw clash(room);
     await audit(trx, { ...actor, action: 'room.update', targetId: roomId, detail: { version: room.version } });
     return room;
   });
@@ -126,7 +101,8 @@ export async function updateRoom(
 export async function deleteRoom(actor: GardenActor, roomId: string): Promise<void> {
   requireAllowed(actor, 'room.delete');
   await inGarden(actor.gardenId, async (trx) => {
-    const room = await roomById(trx, actor.gardenId, roomId);
+    // Held first: a tent that is being put in this room is seen, or finds the room gone.
+    const room = await roomById(trx, actor.gardenId, roomId, 'change');
     const tents = await trx
       .selectFrom('tents')
       .where('garden_id', '=', actor.gardenId)

@@ -10,16 +10,17 @@ import { toScenarioDocument } from '../evaluation/scenario-document';
 import type { ScenarioDocument } from '../evaluation/evaluate-scenario';
 import { gardenById } from '../gardens/garden.queries';
 import type { Garden } from '../gardens/garden.schema';
-import { fixturesOf } from '../fixtures/fixture.service';
+import { fixturesOf } from '../fixtures/fixture.queries';
 import type { Fixture } from '../fixtures/fixture.schema';
 import { notFoundHere } from '../http/app-error';
 import { referenceData } from '../reference-data/reference-data';
-import { roomsOf } from '../rooms/room.service';
+import { roomsOf } from '../rooms/room.queries';
 import type { Room } from '../rooms/room.schema';
 import { defaultTariff } from '../tariffs/default-tariff';
-import { targetsOf } from '../targets/target.service';
-import { tentsOf } from '../tents/tent.service';
+import { targetsOf } from '../targets/target.queries';
+import { tentsOf } from '../tents/tent.queries';
 import type { Tent } from '../tents/tent.schema';
+import { carriedBy } from './circuit-loads';
 import { scenariosOf } from './scenario.queries';
 import type { Scenario, Workbench } from './scenario.schema';
 
@@ -47,42 +48,40 @@ export async function readGardenData(trx: GardenTransaction, actor: GardenActor)
   };
 }
 
-const EVERYTHING = ['light', 'heater', 'exhaust', 'circulation', 'pump'];
-
 /** Rated watts that a tent's scenario in use puts on each circuit of its room. */
-function loadsOnCircuits(room: Room, { plan }: Scenario, fixtures: readonly Fixture[]): Record<string, number> {
+function loadsOnCircuits(room: Room, { plan }: Scenario, fixtures: readonly Fixture[]): Map<string, number> {
   const lamps = plan.placements.map((placement) => ({
     id: placement.id,
     watts: fixtures.find((fixture) => fixture.fixtureId === placement.fixture)?.spec.inputPowerW ?? 0,
   }));
-  const devices: Record<string, number> = {
-    heater: plan.climate.heater?.ratedPowerW ?? 0,
-    exhaust: plan.climate.exhaust?.inputPowerW ?? 0,
-    circulation: plan.climate.circulation?.inputPowerW ?? 0,
-    pump: plan.water?.pump?.inputPowerW ?? 0,
-  };
-  const named = new Set(Object.values(plan.circuitLoads ?? {}).flat());
-  return Object.fromEntries(
-    room.power.circuits.map(({ id }, index) => {
-      const carries = plan.circuitLoads ? (plan.circuitLoads[id] ?? []) : index === 0 ? EVERYTHING : [];
+  const devices = new Map([
+    ['heater', plan.climate.heater?.ratedPowerW ?? 0],
+    ['exhaust', plan.climate.exhaust?.inputPowerW ?? 0],
+    ['circulation', plan.climate.circulation?.inputPowerW ?? 0],
+    ['pump', plan.water?.pump?.inputPowerW ?? 0],
+  ]);
+  const circuits = carriedBy(plan, room.power.circuits);
+  const named = new Set(circuits.flatMap(({ carries }) => carries));
+  return new Map(
+    circuits.map(({ id, carries }) => {
       const light = lamps
-        .filter((lamp) => (named.has(lamp.id) ? carries.includes(lamp.id) : carries.includes('light')))
+        .filter((lamp) => carries.includes(named.has(lamp.id) ? lamp.id : 'light'))
         .reduce((sum, lamp) => sum + lamp.watts, 0);
-      return [id, light + carries.reduce((sum, load) => sum + (devices[load] ?? 0), 0)];
+      return [id, light + carries.reduce((sum, load) => sum + (devices.get(load) ?? 0), 0)];
     }),
   );
 }
 
 function otherLoadsFor({ tents, scenarios, fixtures }: GardenData, room: Room, tentId: string): Record<string, number> {
-  const sums: Record<string, number> = {};
+  const sums = new Map<string, number>();
   for (const tent of tents) {
     if (tent.tentId === tentId || tent.roomId !== room.roomId) continue;
     const current = scenarios.find((scenario) => scenario.scenarioId === tent.currentScenarioId);
     if (!current) continue;
-    for (const [circuit, watts] of Object.entries(loadsOnCircuits(room, current, fixtures)))
-      sums[circuit] = (sums[circuit] ?? 0) + watts;
+    for (const [circuit, watts] of loadsOnCircuits(room, current, fixtures))
+      sums.set(circuit, (sums.get(circuit) ?? 0) + watts);
   }
-  return sums;
+  return Object.fromEntries(sums);
 }
 
 function targetsFor({ ownTargets }: GardenData, { plan }: Scenario): ResolvedTarget[] {

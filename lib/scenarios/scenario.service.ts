@@ -6,30 +6,28 @@ import { audit } from '../audit/audit';
 import { requireAllowed } from '../auth/require-allowed';
 import type { GardenActor } from '../auth/session';
 import { changedColumns } from '../db/changed-columns';
+import { requireSame } from '../db/sent-twice';
 import { inGarden, type GardenTransaction } from '../db/transactions';
-import { fixturesOf } from '../fixtures/fixture.service';
+import { placedFixtures } from '../fixtures/fixture.queries';
 import { clash, inUse, invalid } from '../http/app-error';
-import { checkRack } from '../evaluation/scenario.schema';
-import { pathText } from '../evaluation/problems';
-import { tentById } from '../tents/tent.service';
+import { roomById } from '../rooms/room.queries';
+import { tentById } from '../tents/tent.queries';
 import type { Plan } from './plan.schema';
+import { problemsOfPlan } from './plan-fit';
 import { linkFixtures, scenarioById, scenariosOf } from './scenario.queries';
 import type { Scenario, ScenarioChange, ScenarioCopy, ScenarioInput } from './scenario.schema';
 import { starterPlan } from './starter-plan';
 
-/** What no schema of the plan alone can see: everything inside this tent, every lamp one of this garden. */
+/**
+ * What no schema of the plan alone can see: everything inside this tent, every lamp one of this garden, every load on one
+ * circuit. Lamps and tent are held until the plan is written, so that neither goes from under it.
+ */
 async function requireFits(trx: GardenTransaction, gardenId: string, tentId: string, plan: Plan): Promise<void> {
-  const tent = await tentById(trx, gardenId, tentId);
-  const fixtures = new Set((await fixturesOf(trx, gardenId)).map((fixture) => fixture.fixtureId));
-  const problems: { path: string; message: string }[] = [];
-  const rack = {
-    tent: tent.body,
-    tiers: plan.tiers,
-    placements: plan.placements,
-    schedules: plan.schedules,
-    boxes: plan.boxes,
-  };
-  checkRack(rack, fixtures, (path, message) => problems.push({ path: pathText(['plan', ...path]), message }));
+  const tent = await tentById(trx, gardenId, tentId, 'keep');
+  const room = await roomById(trx, gardenId, tent.roomId);
+  const placed = [...new Set(plan.placements.map((placement) => placement.fixture))];
+  const fixtures = await placedFixtures(trx, gardenId, placed);
+  const problems = problemsOfPlan({ plan, tent, room, fixtures });
   if (problems.length > 0) throw invalid(problems, 'The plan does not fit this tent.');
 }
 
@@ -73,7 +71,9 @@ async function insert(
     await linkFixtures(trx, actor.gardenId, scenarioId, plan);
     await audit(trx, { ...actor, action, targetId: scenarioId });
   }
-  return scenarioById(trx, actor.gardenId, scenarioId);
+  const kept = await scenarioById(trx, actor.gardenId, scenarioId);
+  requireSame('scenarioId', { tentId, name, note, plan }, kept);
+  return kept;
 }
 
 /** Adds a scenario to a tent. Sent twice with one id, it is added once. */
@@ -147,6 +147,9 @@ export async function updateScenario(
 export async function deleteScenario(actor: GardenActor, scenarioId: string): Promise<void> {
   requireAllowed(actor, 'scenario.delete');
   await inGarden(actor.gardenId, async (trx) => {
+    const { tentId } = await scenarioById(trx, actor.gardenId, scenarioId);
+    // One at a time for each tent: two people who delete its last two scenarios must not both succeed.
+    await tentById(trx, actor.gardenId, tentId, 'change');
     const scenario = await scenarioById(trx, actor.gardenId, scenarioId);
     const others = (await scenariosOf(trx, actor.gardenId, scenario.tentId)).filter(
       (each) => each.scenarioId !== scenarioId,

@@ -5,51 +5,16 @@ import { sql } from 'kysely';
 import { audit } from '../audit/audit';
 import { requireAllowed } from '../auth/require-allowed';
 import type { GardenActor } from '../auth/session';
-import type { TargetFigures } from '../crops/crop.schema';
+import { targetKey } from '../crops/crop.schema';
+import { resolveTarget } from '../crops/reference-target';
 import { changedColumns } from '../db/changed-columns';
+import { requireSame } from '../db/sent-twice';
 import { inGarden, type GardenTransaction } from '../db/transactions';
-import { clash, notFoundHere } from '../http/app-error';
+import { clash, inUse, notFoundHere } from '../http/app-error';
+import { referenceData } from '../reference-data/reference-data';
+import { scenariosOf } from '../scenarios/scenario.queries';
+import { targetById, targetsOf } from './target.queries';
 import type { GardenTarget, TargetChange, TargetInput } from './target.schema';
-
-const columns = ['target_id', 'crop', 'stage', 'figures', 'note', 'version'] as const;
-
-const toTarget = (row: {
-  target_id: string;
-  crop: string;
-  stage: string;
-  figures: unknown;
-  note: string;
-  version: number;
-}): GardenTarget => ({
-  targetId: row.target_id,
-  crop: row.crop,
-  stage: row.stage,
-  figures: row.figures as TargetFigures,
-  note: row.note,
-  version: row.version,
-});
-
-export async function targetsOf(trx: GardenTransaction, gardenId: string): Promise<GardenTarget[]> {
-  const rows = await trx
-    .selectFrom('targets')
-    .where('garden_id', '=', gardenId)
-    .select(columns)
-    .orderBy('crop')
-    .orderBy('stage')
-    .execute();
-  return rows.map(toTarget);
-}
-
-async function targetById(trx: GardenTransaction, gardenId: string, targetId: string): Promise<GardenTarget> {
-  const row = await trx
-    .selectFrom('targets')
-    .where('garden_id', '=', gardenId)
-    .where('target_id', '=', targetId)
-    .select(columns)
-    .executeTakeFirst();
-  if (!row) throw notFoundHere('target');
-  return toTarget(row);
-}
 
 export async function listTargets(actor: GardenActor): Promise<GardenTarget[]> {
   requireAllowed(actor, 'target.read');
@@ -72,11 +37,12 @@ export async function createTarget(
       await audit(trx, { ...actor, action: 'target.create', targetId });
       return targetById(trx, actor.gardenId, targetId);
     }
-    const standing = (await targetsOf(trx, actor.gardenId)).find(
-      (each) => each.targetId === targetId || (each.crop === crop && each.stage === stage),
-    );
+    const own = await targetsOf(trx, actor.gardenId);
+    const standing =
+      own.find((each) => each.targetId === targetId) ?? own.find((each) => each.crop === crop && each.stage === stage);
     if (!standing) throw notFoundHere('target');
     if (standing.targetId !== targetId) throw clash(standing);
+    requireSame('targetId', { crop, stage, figures, note }, standing);
     return standing;
   });
 }
@@ -102,10 +68,24 @@ export async function updateTarget(
   });
 }
 
+/** Where the reference knows the crop, its figures take over; a crop of the garden's own that is planned on has no other. */
+async function requireDispensable(trx: GardenTransaction, gardenId: string, target: GardenTarget): Promise<void> {
+  if (resolveTarget(target, [], referenceData().crops)) return;
+  const uses = (await scenariosOf(trx, gardenId)).filter(({ plan }) =>
+    plan.tiers.some(({ targetRef }) => targetRef && targetKey(targetRef) === targetKey(target)),
+  );
+  if (uses.length > 0)
+    throw inUse(
+      `${target.crop}, ${target.stage}, is planned in ${uses.map((use) => `“${use.name}”`).join(', ')}, and the reference does not know it. Choose another crop there first.`,
+    );
+}
+
+/** Goes back to the reference. */
 export async function deleteTarget(actor: GardenActor, targetId: string): Promise<void> {
   requireAllowed(actor, 'target.delete');
   await inGarden(actor.gardenId, async (trx) => {
-    await targetById(trx, actor.gardenId, targetId);
+    const target = await targetById(trx, actor.gardenId, targetId);
+    await requireDispensable(trx, actor.gardenId, target);
     await trx.deleteFrom('targets').where('garden_id', '=', actor.gardenId).where('target_id', '=', targetId).execute();
     await audit(trx, { ...actor, action: 'target.delete', targetId });
   });

@@ -6,51 +6,14 @@ import { audit } from '../audit/audit';
 import { requireAllowed } from '../auth/require-allowed';
 import type { GardenActor } from '../auth/session';
 import { changedColumns } from '../db/changed-columns';
+import { requireSame } from '../db/sent-twice';
 import { inGarden, type GardenTransaction } from '../db/transactions';
-import { clash, invalid, notFoundHere } from '../http/app-error';
-import { roomById } from '../rooms/room.service';
+import { clash, invalid } from '../http/app-error';
+import { roomById } from '../rooms/room.queries';
+import { requireScenariosFit } from '../scenarios/plan-fit.service';
 import { starterPlan } from '../scenarios/starter-plan';
+import { tentById, tentsOf } from './tent.queries';
 import type { Tent, TentChange, TentInput } from './tent.schema';
-
-const columns = ['tent_id', 'room_id', 'name', 'body', 'current_scenario_id', 'version'] as const;
-
-const toTent = (row: {
-  tent_id: string;
-  room_id: string;
-  name: string;
-  body: unknown;
-  current_scenario_id: string | null;
-  version: number;
-}): Tent => ({
-  tentId: row.tent_id,
-  roomId: row.room_id,
-  name: row.name,
-  body: row.body as Tent['body'],
-  currentScenarioId: row.current_scenario_id,
-  version: row.version,
-});
-
-export async function tentsOf(trx: GardenTransaction, gardenId: string): Promise<Tent[]> {
-  const rows = await trx
-    .selectFrom('tents')
-    .where('garden_id', '=', gardenId)
-    .select(columns)
-    .orderBy('created_at')
-    .orderBy('tent_id')
-    .execute();
-  return rows.map(toTent);
-}
-
-export async function tentById(trx: GardenTransaction, gardenId: string, tentId: string): Promise<Tent> {
-  const row = await trx
-    .selectFrom('tents')
-    .where('garden_id', '=', gardenId)
-    .where('tent_id', '=', tentId)
-    .select(columns)
-    .executeTakeFirst();
-  if (!row) throw notFoundHere('tent');
-  return toTent(row);
-}
 
 export async function listTents(actor: GardenActor): Promise<Tent[]> {
   requireAllowed(actor, 'tent.read');
@@ -69,7 +32,7 @@ export async function createTent(
 ): Promise<Tent> {
   requireAllowed(actor, 'tent.create');
   return inGarden(actor.gardenId, async (trx) => {
-    await roomById(trx, actor.gardenId, roomId);
+    await roomById(trx, actor.gardenId, roomId, 'keep');
     const made = await trx
       .insertInto('tents')
       .values({ garden_id: actor.gardenId, tent_id: tentId, room_id: roomId, name, body: JSON.stringify(body) })
@@ -96,7 +59,9 @@ export async function createTent(
         .execute();
       await audit(trx, { ...actor, action: 'tent.create', targetId: tentId });
     }
-    return tentById(trx, actor.gardenId, tentId);
+    const kept = await tentById(trx, actor.gardenId, tentId);
+    requireSame('tentId', { roomId, name, body }, kept);
+    return kept;
   });
 }
 
@@ -107,9 +72,16 @@ export async function updateTent(
 ): Promise<Tent> {
   requireAllowed(actor, 'tent.update');
   return inGarden(actor.gardenId, async (trx) => {
-    if (roomId) await roomById(trx, actor.gardenId, roomId);
+    const before = await tentById(trx, actor.gardenId, tentId, 'change');
+    if (before.version !== version) throw clash(before);
+    if (roomId || change.body) {
+      const room = await roomById(trx, actor.gardenId, roomId ?? before.roomId, 'keep');
+      const path = change.body ? 'body' : 'roomId';
+      const after = { ...before, body: change.body ?? before.body };
+      await requireScenariosFit(trx, actor.gardenId, { tent: after, room, path });
+    }
     if (currentScenarioId) await requireOwnScenario(trx, actor.gardenId, tentId, currentScenarioId);
-    const updated = await trx
+    await trx
       .updateTable('tents')
       .set({
         ...changedColumns({ ...change, room_id: roomId, current_scenario_id: currentScenarioId }),
@@ -118,10 +90,8 @@ export async function updateTent(
       })
       .where('garden_id', '=', actor.gardenId)
       .where('tent_id', '=', tentId)
-      .where('version', '=', version)
-      .executeTakeFirst();
+      .execute();
     const tent = await tentById(trx, actor.gardenId, tentId);
-    if (!updated.numUpdatedRows) throw clash(tent);
     await audit(trx, { ...actor, action: 'tent.update', targetId: tentId, detail: { version: tent.version } });
     return tent;
   });

@@ -1,6 +1,6 @@
 import { payback, type ComparisonColumn, type Payback } from '@/lib/comparison/comparison';
 import { differenceText, figureText } from '@/lib/format/figure';
-import { formatMoney, minorPerMajor } from '@/lib/format/money';
+import { formatMoney } from '@/lib/format/money';
 
 export const missing = (column: ComparisonColumn) => column.tiers.filter((tier) => tier.verdict === 'below');
 
@@ -43,7 +43,7 @@ export function headline(columns: readonly ComparisonColumn[], base: ComparisonC
 
 export function paybackWords(column: ComparisonColumn, base: ComparisonColumn): { text: string; note?: string } {
   if (column === base) return { text: '–' };
-  const back: Payback = payback(column, base, minorPerMajor(column.currency));
+  const back: Payback = payback(column, base);
   switch (back.kind) {
     case 'none':
       return { text: '–' };
