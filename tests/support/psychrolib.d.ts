@@ -1,4 +1,14 @@
 declare module 'psychrolib' {
-  const psychrolib: Record<string, (...args: number[]) => number> & { SI: number };
+  type Formula = (...args: number[]) => number;
+  const psychrolib: { SI: number; SetUnitSystem(system: number): void } & Record<
+    | 'GetStandardAtmPressure'
+    | 'GetSatVapPres'
+    | 'GetHumRatioFromRelHum'
+    | 'GetMoistAirDensity'
+    | 'GetMoistAirEnthalpy'
+    | 'GetTDewPointFromRelHum'
+    | 'GetTWetBulbFromRelHum',
+    Formula
+  >;
   export default psychrolib;
 }
