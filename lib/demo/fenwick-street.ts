@@ -33,7 +33,7 @@ const climate: DemoScenario['plan']['climate'] = {
   nightTempC: celsius(61),
   maxTempC: celsius(83),
   maxRelHumidityPct: 76,
-  heater: { ratedPowerW: 750, priceMinor: 4900, owned: false, placeM: [-1.1, inch(13), 0], clearanceM: 0.91 },
+  heater: { ratedPowerW: 750, priceMinor: 4900, owned: false, clearanceM: 0.91 },
   exhaust: { maxAirflowM3H: 250, inputPowerW: 24, priceMinor: 7400, owned: false },
   circulation: { inputPowerW: 11 },
 };

@@ -36,7 +36,7 @@ const climate: DemoScenario['plan']['climate'] = {
   nightTempC: 17,
   maxTempC: 26.5,
   maxRelHumidityPct: 78,
-  heater: { ratedPowerW: 400, priceMinor: 5400, owned: true, placeM: [-0.9, 0.35, 0], clearanceM: null },
+  heater: { ratedPowerW: 400, priceMinor: 5400, owned: true, clearanceM: null },
   exhaust: { maxAirflowM3H: 180, inputPowerW: 17, priceMinor: 6900, owned: true },
   circulation: { inputPowerW: 7 },
 };

@@ -15,17 +15,23 @@ function clearance({ scenario }: CautionFacts): Caution[] {
       ? 'its label is not known, so the usual 1 m (3 ft) is asked for'
       : `its maker's label asks for ${cm(heater.clearanceM)}; without a label 1 m (3 ft) is asked for`;
   const { widthM, depthM } = scenario.tent;
-  const inside = heater.placeM !== undefined;
   const place = heater.placeM;
-  const nearest = place ? Math.min(place[0], widthM - place[0], place[1], depthM - place[1]) : null;
-  if (inside && nearest !== null && nearest < asked) {
-    const tooNarrow = Math.min(widthM, depthM) < 2 * asked;
+  // In the tent, the nearest wall; beside it, the way to the fabric.
+  const within = place !== undefined && place[0] >= 0 && place[0] <= widthM && place[1] >= 0 && place[1] <= depthM;
+  const outside = (value: number, most: number) => Math.max(0, -value, value - most);
+  const nearest = !place
+    ? null
+    : within
+      ? Math.min(place[0], widthM - place[0], place[1], depthM - place[1])
+      : Math.hypot(outside(place[0], widthM), outside(place[1], depthM));
+  if (nearest !== null && nearest < asked) {
+    const tooNarrow = within && Math.min(widthM, depthM) < 2 * asked;
     return [
       {
         code: 'heater.clearance',
         severity: 'danger',
         where: 'climate.heater',
-        text: `The heater stands ${cm(Math.max(0, nearest))} from the fabric; ${label}. ${tooNarrow ? 'This tent is too narrow for that anywhere: warm the room, or the air that is drawn in, before you heat inside.' : 'Move it, or warm the room or the air that is drawn in.'} The maker's instructions decide.`,
+        text: `The heater stands ${cm(nearest)} from the fabric; ${label}. ${tooNarrow ? 'This tent is too narrow for that anywhere: warm the room, or the air that is drawn in, before you heat inside.' : 'Move it, or warm the room or the air that is drawn in.'} The maker's instructions decide.`,
         source: sources.NFPA_HEATER.citation,
       },
     ];

@@ -22,7 +22,7 @@ export function AirTemperature({ room, change, readOnly }: RoomPartProps) {
   const put = (airTempC: Series) => change({ climate: { ...room.climate, airTempC } });
   const swing = series.kind === 'monthly' ? series.dailySwingK : undefined;
   return (
-    <section className="grid gap-x-6 gap-y-4 pt-10 lg:grid-cols-[196px_minmax(0,1fr)_160px]">
+    <section className="grid gap-x-6 gap-y-4 pt-10 lg:grid-cols-[196px_minmax(0,1fr)] xl:grid-cols-[196px_minmax(0,1fr)_160px]">
       <div>
         <h2 className="text-14 font-semibold">Air temperature</h2>
         <p className="pb-2 text-12 text-ink-soft">
@@ -164,7 +164,8 @@ function Months({ values, swingK, readOnly, put }: MonthsProps) {
             step={0.1}
             min={-40}
             max={60}
-            className="w-full md:text-center"
+            className="w-full"
+            unit=""
             value={value}
             disabled={readOnly}
             onCommit={(next) => put(values.map((each, index) => (index === at ? next : each)))}
@@ -172,7 +173,8 @@ function Months({ values, swingK, readOnly, put }: MonthsProps) {
         ))}
       </div>
       <p className="pt-2 text-12 text-ink-soft">
-        Up and down keys change a month by 0.1 K, with Shift by 1 K. 60 F works too.
+        In {formatQuantity(0, 'temperature', units).unit}. Up and down keys change a month by 0.1 K, with Shift by 1 K.
+        60 F works too.
       </p>
     </div>
   );

@@ -49,5 +49,9 @@ export function climateLead({ document, evaluation, units }: Facts): string {
   ) {
     return `A fan of ${formatQuantity(heat.recommendedExhaustM3H, 'airflow', units).text} would carry off the lamps’ heat and the plants’ moisture.`;
   }
+  if (heat.wallDewMarginK < 0) {
+    const lower = Math.max(50, Math.round(document.climate.maxRelHumidityPct ?? 75) - 8);
+    return `Allow less humidity, say ${lower} %, so that the fan carries more of it off; or warm the wall with a quilt.`;
+  }
   return 'Nothing to do. Hang a thermometer that keeps its lowest and highest, and see whether it agrees.';
 }
