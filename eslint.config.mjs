@@ -16,6 +16,8 @@ export default defineConfig([
   globalIgnores(['.next/**', '.data/**', 'next-env.d.ts', 'node_modules/**', 'public/**']),
   {
     rules: {
+      // Where somebody's access ends the page is loaded anew, so that nothing of theirs stays in memory.
+      '@next/next/no-location-assign-relative-destination': 'off',
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
     },
   },
@@ -24,7 +26,27 @@ export default defineConfig([
     rules: {
       'no-restricted-imports': [
         'error',
-        { patterns: [group(['@/app/*', '@/lib/*', '**/lib/*', '**/app/*', 'zod', 'react', 'react-*', 'next', 'next/*', 'kysely', 'pg', 'node:*'], 'physics is pure and imports nothing above it.')] },
+        {
+          patterns: [
+            group(
+              [
+                '@/app/*',
+                '@/lib/*',
+                '**/lib/*',
+                '**/app/*',
+                'zod',
+                'react',
+                'react-*',
+                'next',
+                'next/*',
+                'kysely',
+                'pg',
+                'node:*',
+              ],
+              'physics is pure and imports nothing above it.',
+            ),
+          ],
+        },
       ],
       'no-restricted-globals': ['error', 'process', 'fetch', 'window', 'document', 'performance', 'setTimeout'],
       'no-restricted-properties': ['error', ...clock],
@@ -35,7 +57,14 @@ export default defineConfig([
     rules: {
       'no-restricted-imports': [
         'error',
-        { patterns: [group(['@/physics/*', '**/physics/*', 'kysely', 'pg', '@/lib/db/*', '**/*.queries'], 'app imports lib services, schemas and hooks; never physics or the database.')] },
+        {
+          patterns: [
+            group(
+              ['@/physics/*', '**/physics/*', 'kysely', 'pg', '@/lib/db/*', '**/*.queries'],
+              'app imports lib services, schemas and hooks; never physics or the database.',
+            ),
+          ],
+        },
       ],
     },
   },
@@ -48,7 +77,10 @@ export default defineConfig([
   {
     files: ['migrations/**/*.ts'],
     rules: {
-      'no-restricted-imports': ['error', { patterns: [group(['@/*', '../*'], 'a migration is frozen in time: it imports kysely only.')] }],
+      'no-restricted-imports': [
+        'error',
+        { patterns: [group(['@/*', '../*'], 'a migration is frozen in time: it imports kysely only.')] },
+      ],
     },
   },
 ]);

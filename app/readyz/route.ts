@@ -1,4 +1,4 @@
-import { checkReady } from '@/lib/db/ready';
+import { checkReady } from '@/lib/http/ready';
 
 /** GET /readyz: the database answers and has the schema that this build expects. */
 export const dynamic = 'force-dynamic';

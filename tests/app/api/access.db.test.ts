@@ -37,7 +37,7 @@ beforeAll(async () => {
 afterAll(closePools);
 
 async function ask(row: RouteRow, person: Person | null, ids: Record<string, string>): Promise<Response> {
-  const module = (await import(/* @vite-ignore */ path.resolve(row.file))) as Record<string, Handler>;
+  const handlers = (await import(/* @vite-ignore */ path.resolve(row.file))) as Record<string, Handler>;
   const params = Object.fromEntries([...row.file.matchAll(/\[(\w+)\]/g)].map(([, name]) => [name!, ids[name!]!]));
   const address = row.file
     .replace(/^app/, '')
@@ -54,7 +54,7 @@ async function ask(row: RouteRow, person: Person | null, ids: Record<string, str
     },
     ...(row.body && { body: JSON.stringify(row.body(ids)) }),
   });
-  return module[row.method]!(request, { params: Promise.resolve(params) });
+  return handlers[row.method]!(request, { params: Promise.resolve(params) });
 }
 
 const idsOf = (of: PlannedGarden): Record<string, string> => ({
@@ -74,9 +74,9 @@ describe('the access table', () => {
     const known = new Set(otherRoutes);
     for (const file of filesNamed('route.ts')) {
       if (known.has(file)) continue;
-      const module = (await import(/* @vite-ignore */ path.resolve(file))) as Record<string, unknown>;
+      const handlers = (await import(/* @vite-ignore */ path.resolve(file))) as Record<string, unknown>;
       for (const method of ['GET', 'POST', 'PUT', 'PATCH', 'DELETE']) {
-        if (module[method])
+        if (handlers[method])
           expect(listed, `${method} ${file} needs a row in tests/app/access-table.ts`).toContain(`${method} ${file}`);
       }
     }

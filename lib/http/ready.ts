@@ -1,7 +1,7 @@
 import 'server-only';
 
 import { sql } from 'kysely';
-import { authDb } from './client';
+import { authDb } from '../db/client';
 
 /** Whether the database answers within a second. */
 export async function checkReady(): Promise<{ ready: boolean; token?: string }> {
