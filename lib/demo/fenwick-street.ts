@@ -166,9 +166,15 @@ export const fenwickStreet: DemoGarden = {
       },
     },
     {
-      name: 'Bars through the night',
-      note: 'The same bars, lit while the garage is coldest.',
-      plan: { tiers, schedules, climate, water, placements: bars((tier) => (tier === 1 ? 'spinach-night' : 'night')) },
+      name: 'Bars through the night, cooler',
+      note: 'The same bars, lit while the garage is coldest, and a few degrees less all day.',
+      plan: {
+        tiers,
+        schedules,
+        climate: { ...climate, dayTempC: celsius(66), nightTempC: celsius(57) },
+        water,
+        placements: bars((tier) => (tier === 1 ? 'spinach-night' : 'night')),
+      },
     },
   ],
 };

@@ -48,47 +48,6 @@ test('each demo garden has three scenarios worth comparing: tiers inside, tiers 
     const { actor } = await ownedGarden(email);
     const all = await evaluateScenarios(actor, ids);
     expect(all).toHaveLength(3);
-    if (process.env['SHOW_DEMO'])
-      for (const { workbench, evaluation: e } of all) {
-        console.log(
-          workbench.scenario.name,
-          e.tiers.map(
-            (t) =>
-              `${t.id} ${t.dliMolM2D.mean.toFixed(1)} ${t.verdict} ${t.ppfdUmolM2S.minOverMean.toFixed(2)} stray ${t.strayPpfdUmolM2S?.toFixed(1)}`,
-          ),
-        );
-        console.log(
-          '  heater',
-          e.heat.recommendedHeaterW,
-          e.heat.coldDark.heaterW.toFixed(0),
-          'fan',
-          e.heat.recommendedExhaustM3H,
-          'margin',
-          e.heat.wallDewMarginK.toFixed(1),
-          'RH',
-          e.heat.coldDark.tentRelHumidityPct.toFixed(0),
-          'kWh',
-          e.year.energyKwh.total.toFixed(0),
-          'cost',
-          e.year.cost.toFixed(0),
-          'unmet',
-          e.year.months.reduce((s, m) => s + m.unmetHeatKh, 0).toFixed(0),
-          'over',
-          e.year.months.reduce((s, m) => s + m.overheatKh, 0).toFixed(0),
-          'cond',
-          e.year.months.reduce((s, m) => s + m.condensationH, 0),
-          'circ',
-          e.circuits.map((c) => `${c.id} ${c.continuousA.toFixed(1)}/${c.limitA}`),
-          'up',
-          e.upFront.costMinor,
-        );
-        console.log(
-          '  ',
-          e.cautions.map((c) => `${c.severity} ${c.code}`),
-          e.warnings,
-          workbench.targets.length,
-        );
-      }
     const verdicts = all.flatMap(({ evaluation }) => evaluation.tiers.map((tier) => tier.verdict));
     expect(verdicts).toContain('inside');
     expect(verdicts).toContain('below');
