@@ -34,6 +34,7 @@ export function comparisonCsv(columns: readonly ComparisonColumn[], baseId: stri
 export function comparisonFileName(gardenName: string): string {
   const plain = gardenName
     .normalize('NFKD')
+    .replaceAll(/\p{M}/gu, '')
     .replaceAll(/[^A-Za-z0-9]+/g, '-')
     .replaceAll(/^-+|-+$/g, '')
     .slice(0, 60)

@@ -91,9 +91,9 @@ function loadPrices(): ReferencePrice[] {
         pricePerKwh: american ? price / 100 : price,
         currency: american ? 'USD' : 'EUR',
         source: row['source']!,
-        knownHow: row['known_how']!,
+        knownHow: row['how_known']!,
         // Read in the work itself, unless its row says that it was quoted elsewhere.
-        standing: /secondary|repeating/.test(row['known_how']!) ? 'secondary' : 'read',
+        standing: /secondary|repeating/.test(row['how_known']!) ? 'secondary' : 'read',
       },
     ];
   });
