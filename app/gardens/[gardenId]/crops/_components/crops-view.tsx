@@ -68,7 +68,7 @@ export function CropsView({ garden, crops, targets: initial, grown, mayEdit }: C
       headline="What a crop wants in a day. Where books differ, you see both."
       lead={
         unsure.length > 0
-          ? `${unsure.length} of your ${ours.length} rest on memory or judgement: ${unsure.map((row) => row.crop).join(', ')}.`
+          ? `${unsure.length} of your ${ours.length} ${unsure.length === 1 ? 'rests' : 'rest'} on memory or judgement: ${unsure.map((row) => row.crop).join(', ')}.`
           : `${crops.length} crops and stages, each figure with its source.`
       }
     >
