@@ -26,7 +26,10 @@ function digitsFor(value: number): number {
 /** A figure of an explanation in the person's units. */
 export function explainedFigure(value: number, unit: string, system: UnitSystem): { figure: string; unit: string } {
   const kind = KINDS[unit];
-  if (kind && system === 'us') return formatQuantity(value, kind, system);
+  if (kind && system === 'us') {
+    const shown = formatQuantity(value, kind, system);
+    return { figure: shown.figure, unit: shown.unit };
+  }
   const digits = digitsFor(value);
   const figure = figureText(value, digits);
   return { figure: figure.includes('.') ? figure.replace(/\.?0+$/, '') : figure, unit };

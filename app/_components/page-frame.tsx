@@ -11,7 +11,7 @@ interface Crumb {
 interface PageFrameProps {
   /** The garden whose pages these are; without one only the gardens stand. */
   garden?: { gardenId: string; name: string } | undefined;
-  current?: 'gardens' | 'garden' | 'fixtures' | 'crops' | 'people' | 'compare' | 'account';
+  current?: 'gardens' | 'garden' | 'fixtures' | 'crops' | 'people' | 'compare' | 'account' | 'new' | 'join';
   /** Where one is, inside the garden; the last is this page. */
   crumbs?: readonly Crumb[];
   /** Save state, undo: what belongs to the whole page. */
@@ -25,7 +25,13 @@ interface PageFrameProps {
 
 function namesOf({ garden, current }: PageFrameProps): PageName[] {
   const all: PageName[] = [{ words: 'Gardens', href: '/gardens', current: current === 'gardens' }];
-  if (!garden) return all;
+  if (!garden) {
+    return [
+      ...all,
+      { words: 'Make a garden', href: '/gardens/new', current: current === 'new' },
+      { words: 'Join with a code', href: '/gardens/join', current: current === 'join' },
+    ];
+  }
   const at = `/gardens/${garden.gardenId}`;
   return [
     ...all,
@@ -45,7 +51,7 @@ export function PageFrame(props: PageFrameProps) {
     : [...crumbs];
   return (
     <div className="mx-auto min-h-dvh max-w-360 px-18 max-lg:px-8 max-md:px-4">
-      <header className="grid grid-cols-[196px_1fr_auto] gap-x-6 border-b border-line pt-6 max-lg:grid-cols-[1fr_auto] max-md:pt-4 print:hidden">
+      <header className="grid grid-cols-[196px_1fr_auto] items-baseline gap-x-6 border-b border-line pt-6 max-lg:grid-cols-[1fr_auto] max-md:pt-4 print:hidden">
         <TextLink href="/gardens" look="plain" className="text-17 font-semibold max-lg:hidden">
           Cellarsun
         </TextLink>

@@ -23,10 +23,14 @@ function guarded(text: string): string {
   return /^[=+@\t\r]/.test(text) || (/^-/.test(text) && !/^-[\d.]+$/.test(text)) ? `'${text}` : text;
 }
 
+/** A number alone in its cell loses the spaces between its thousands. */
+const ungrouped = (text: string): string =>
+  /^-?\d{1,3}([\u2009\u202f\u00a0 ]\d{3})+(\.\d+)?$/.test(text) ? text.replaceAll(/[\u2009\u202f\u00a0 ]/g, '') : text;
+
 /** RFC 4180: comma, CRLF, quotes doubled. */
 export function toCsv(rows: readonly (readonly string[])[]): string {
   const cell = (raw: string) => {
-    const text = guarded(raw.replaceAll('−', '-').replaceAll(/[\u2009\u202f]/g, ''));
+    const text = guarded(ungrouped(raw.replaceAll('−', '-')));
     return /[",\r\n]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
   };
   return rows.map((row) => row.map(cell).join(',')).join('\r\n') + '\r\n';

@@ -5,8 +5,7 @@ import { can } from '@/lib/auth/permissions';
 import { getActor } from '@/lib/auth/session';
 import { listGardenOverviews } from '@/lib/scenarios/overview.service';
 import { PageFrame } from '../_components/page-frame';
-import { TextLink } from '../_components/link';
-import { DashedTent } from './_components/dashed-tent';
+import { AddTent } from './_components/add-tent';
 import { GardenStrip } from './_components/garden-strip';
 import { GardensTable } from './_components/gardens-table';
 import { NoGardens } from './_components/no-gardens';
@@ -43,26 +42,17 @@ export default async function GardensPage() {
       }
     >
       <div className="[--m:84px] max-md:[--m:66px]">
-        {gardens.map((shown) => (
-          <GardenStrip key={shown.garden.gardenId} shown={shown} heightPx={heightPx} />
+        {gardens.map((shown, at) => (
+          <GardenStrip
+            key={shown.garden.gardenId}
+            shown={shown}
+            heightPx={heightPx}
+            adder={at === gardens.length - 1 && mine && <AddTent gardenId={mine.garden.gardenId} />}
+          />
         ))}
       </div>
-      {mine && (
-        <div className="pt-6 pl-55 max-lg:pl-0">
-          <DashedTent>
-            <TextLink href={`/gardens/${mine.garden.gardenId}/tents/new`} look="button">
-              Add a tent
-            </TextLink>
-            <p className="pt-2 text-12 text-ink-soft">
-              It asks first where: in one of these rooms, in a new room, or in a garden of your own.
-            </p>
-          </DashedTent>
-        </div>
-      )}
       <div className="mt-8 flex flex-wrap items-baseline gap-x-6 gap-y-1 border-t border-line pt-4 text-12 text-ink-soft">
         <span>All tents on one scale; their light is the computed one, all lamps on.</span>
-        <TextLink href="/gardens/new">Make a garden</TextLink>
-        <TextLink href="/gardens/join">Join with a code</TextLink>
       </div>
       <GardensTable
         rows={all.map(({ tent, gardenId }) => ({

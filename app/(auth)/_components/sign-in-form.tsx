@@ -37,7 +37,7 @@ export function SignInForm({ next }: { next: string }) {
     window.location.assign(next);
   };
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-3 pt-7">
+    <form method="post" noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-3 pt-7">
       <TextField
         label="E-mail"
         name="email"

@@ -46,7 +46,12 @@ export function SignUpForm() {
     window.location.assign(answer?.ok ? (draft ? '/gardens/new?keep=drawing' : '/gardens') : '/sign-in');
   };
   return (
-    <form noValidate onSubmit={(event) => void handleSubmit(send)(event)} className="flex flex-col gap-4 pt-7">
+    <form
+      method="post"
+      noValidate
+      onSubmit={(event) => void handleSubmit(send)(event)}
+      className="flex flex-col gap-4 pt-7"
+    >
       <RhfTextField
         control={control}
         name="displayName"

@@ -62,7 +62,7 @@ export function LandingTent({ document: example, crops }: { document: ScenarioDo
   const words = useMemo(
     () => (own ? undefined : <LandingWords doc={doc} crops={crops} onChange={change} />),
     // `change` closes over nothing that varies.
-    [own, doc, crops, edited],
+    [own, doc, crops],
   );
   useLampFocus(!own);
   return (

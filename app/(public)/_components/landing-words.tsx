@@ -43,6 +43,7 @@ export function LandingWords({ doc, crops, onChange }: LandingWordsProps) {
           {downward.map((tier) => (
             <SelectField
               key={tier.id}
+              className="w-full"
               label={`${tierName(doc.tiers, tier.id)} grows`}
               value={tier.target ? keyOf(tier.target) : ''}
               options={crops.map((each) => ({ value: keyOf(each), label: each.crop }))}
@@ -56,6 +57,7 @@ export function LandingWords({ doc, crops, onChange }: LandingWordsProps) {
             />
           ))}
           <QuantityField
+            className="w-full"
             label="Cellar air, coldest month"
             kind="temperature"
             value={coldest(doc)}
@@ -66,6 +68,7 @@ export function LandingWords({ doc, crops, onChange }: LandingWordsProps) {
           />
           {tariff.kind === 'flat' && (
             <QuantityField
+              className="w-full"
               label="A kWh costs"
               kind="ratio"
               unit={currencySymbol(tariff.currency)}

@@ -31,7 +31,7 @@ function Sources() {
   const data = referenceData();
   const standing = { key: 'standing', label: 'How it is known' };
   return (
-    <div className="flex flex-col gap-14 pt-8">
+    <div className="flex flex-col gap-8 pt-8">
       <dl className="grid grid-cols-[11rem_minmax(0,1fr)] gap-x-6 gap-y-1.5 text-14 max-md:grid-cols-1">
         {KEY.map((each) => (
           <div key={each} className="contents">
@@ -49,6 +49,7 @@ function Sources() {
         rows={physicsSources()}
       />
       <TableBehind
+        opener="The defaults, taken where a plan is silent"
         caption="Defaults, taken where a plan is silent"
         columns={[
           { key: 'what', label: 'What' },
@@ -60,11 +61,13 @@ function Sources() {
         rows={defaultRows()}
       />
       <TableBehind
+        opener="The works behind the crops"
         caption="Crops"
         columns={[{ key: 'work', label: 'Work' }, { key: 'figures', label: 'Figures', align: 'right' }, standing]}
         rows={cropSources(data)}
       />
       <TableBehind
+        opener="What a kWh costs"
         caption="What a kWh costs"
         columns={[
           { key: 'work', label: 'Work' },

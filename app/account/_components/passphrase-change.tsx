@@ -53,7 +53,7 @@ export function PassphraseChange() {
   };
   return (
     <SectionRow title="Passphrase" about="Changing it ends every other sign-in of yours.">
-      <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-5">
+      <form method="post" noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-5">
         <TextField
           label="Present passphrase"
           type="password"

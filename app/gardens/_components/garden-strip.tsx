@@ -1,3 +1,4 @@
+import type { CSSProperties, ReactNode } from 'react';
 import { Figure } from '@/app/_components/figure';
 import { TextLink } from '@/app/_components/link';
 import { formatMoney } from '@/lib/format/money';
@@ -7,8 +8,15 @@ import type { GardenShown } from './shown';
 
 const ROLE_WORDS = { owner: 'an owner', planner: 'a planner', tender: 'a tender', viewer: 'a viewer' } as const;
 
+interface GardenStripProps {
+  shown: GardenShown;
+  heightPx: number;
+  /** A place for the next tent, on the level of this garden's floor. */
+  adder?: ReactNode;
+}
+
 /** One garden of the house: who one is in it at the left, its rooms cut open beside each other. */
-export function GardenStrip({ shown, heightPx }: { shown: GardenShown; heightPx: number }) {
+export function GardenStrip({ shown, heightPx, adder }: GardenStripProps) {
   const { garden, rooms, month } = shown;
   const at = `/gardens/${garden.gardenId}`;
   const mayAdd = can(garden.role, 'tent.create');
@@ -61,6 +69,14 @@ export function GardenStrip({ shown, heightPx }: { shown: GardenShown; heightPx:
               'A planner or an owner adds the first.'
             )}
           </p>
+        )}
+        {adder && (
+          <div
+            className="flex grow items-end justify-end pl-16 max-lg:justify-start max-lg:pl-0 lg:h-(--tall)"
+            style={{ '--tall': `${heightPx + 22}px` } as CSSProperties}
+          >
+            {adder}
+          </div>
         )}
       </div>
     </section>

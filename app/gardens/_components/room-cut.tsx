@@ -21,11 +21,11 @@ export function RoomCut({ gardenId, shown, heightPx, mayAdd }: RoomCutProps) {
   return (
     <section
       aria-labelledby={`room-${room.roomId}`}
-      className="-ml-2.25 grid min-w-0 grow grid-cols-1 content-start max-lg:ml-0 lg:[grid-template-columns:var(--columns)]"
+      className="-ml-2.25 grid min-w-0 max-w-full grid-cols-1 content-start max-lg:ml-0 lg:[grid-template-columns:var(--columns)]"
       style={{ '--columns': `repeat(${columns}, minmax(0, auto))`, '--tall': `${heightPx}px` } as CSSProperties}
     >
       <div className="hatch-cut p-2.25 lg:row-start-1 lg:[grid-column:1/-1]" style={{ gridColumnEnd: columns + 1 }}>
-        <div className="border-[1.5px] border-ink bg-paper lg:h-(--tall)">
+        <div className="border-t-[1.5px] border-ink bg-paper lg:h-(--tall) lg:border-[1.5px]">
           <h3 id={`room-${room.roomId}`} className="px-7.5 pt-1.5 text-12 max-lg:px-3 max-lg:pb-1.5 lg:text-right">
             <TextLink href={`/gardens/${gardenId}/rooms/${room.roomId}`} look="opens" className="font-semibold">
               {room.name}
@@ -73,6 +73,7 @@ function TentColumn({
       >
         <TentPlace overview={overview} heightPx={heightPx} />
       </div>
+      <div aria-hidden="true" className="hatch-cut h-2.25 lg:hidden" />
       <div
         className="relative pt-2 pr-6 pb-5 pl-9.75 text-14 lg:row-start-2 lg:min-w-56 lg:[grid-column:var(--at)]"
         style={column}

@@ -23,6 +23,8 @@ export interface TentWords {
   link: { words: string; page: TentPageName } | null;
   /** The tier that it is about. */
   tierId: string | null;
+  /** The whole caution, with what helps against it. */
+  remedy: string | null;
 }
 
 type Case = { doc: ScenarioDocument; evaluation: Evaluation; tentName: string };
@@ -31,46 +33,60 @@ const plain = (value: number) => String(Number(value.toFixed(1)));
 /** Short words for the cautions that a person must act on; the whole text stands on the page of the tent. */
 const CAUTIONS: Record<
   string,
-  { urgency: number; sentence: string; clause: string; page: TentPageName; frost?: boolean }
+  {
+    urgency: number;
+    sentence: string;
+    clause: string;
+    page: TentPageName;
+    side: Verdict;
+    tone: TentWords['mark']['tone'];
+  }
 > = {
   'circuit.overRating': {
     urgency: 9,
     sentence: 'Its circuit carries more than its breaker is rated for.',
     clause: 'overloads its circuit',
     page: '/power',
+    side: 'above',
+    tone: 'ember',
   },
   'heater.short': {
     urgency: 6,
     sentence: 'Heat is missing in the coldest hours.',
     clause: 'gets too cold',
     page: '/climate',
-    frost: true,
+    side: 'below',
+    tone: 'frost',
   },
   'air.overheat': {
     urgency: 5,
     sentence: 'It gets too warm on the hot day.',
     clause: 'gets too warm',
     page: '/climate',
+    side: 'above',
+    tone: 'ember',
   },
   'air.condensation': {
     urgency: 4,
     sentence: 'Its wall sweats on the coldest night.',
     clause: 'sweats',
     page: '/climate',
-    frost: true,
+    side: 'above',
+    tone: 'frost',
   },
   'air.humidity': {
     urgency: 3,
     sentence: 'Its air gets damper than you allow.',
     clause: 'gets too damp',
     page: '/climate',
-    frost: true,
+    side: 'above',
+    tone: 'frost',
   },
 };
 
 function unfinished({ doc, tentName }: Case): TentWords | null {
   const soft = { verdict: 'none', tone: 'soft' } as const;
-  const base = { urgency: 1, mark: soft, figure: null, tierId: null };
+  const base = { urgency: 1, mark: soft, figure: null, tierId: null, remedy: null };
   if (doc.placements.length === 0)
     return {
       ...base,
@@ -106,26 +122,24 @@ function aboutLight(each: Case, verdicts: ReadonlyMap<string, TierVerdict>): Ten
     clause: `the ${worst.crop} in the ${tentName} ${below ? 'is short of light' : 'gets too much light'}`,
     link: { words: `Look at ${tierNameInside(doc.tiers, tierId)}`, page: '' },
     tierId,
+    remedy: null,
   };
 }
 
 function aboutCautions({ evaluation, tentName }: Case): TentWords | null {
-  const found = evaluation.cautions
-    .map((caution) => CAUTIONS[caution.code])
-    .filter((each) => each !== undefined)
-    .sort((a, b) => b.urgency - a.urgency)[0];
+  const [found] = evaluation.cautions
+    .flatMap(({ code, text }) => (CAUTIONS[code] ? [{ ...CAUTIONS[code], text }] : []))
+    .sort((a, b) => b.urgency - a.urgency);
   if (!found) return null;
   return {
     urgency: found.urgency,
-    mark: {
-      verdict: found.page === '/power' || !found.frost ? 'above' : found.urgency === 6 ? 'below' : 'above',
-      tone: found.frost ? 'frost' : 'ember',
-    },
+    mark: { verdict: found.side, tone: found.tone },
     figure: null,
     sentence: found.sentence,
     clause: `the ${tentName} ${found.clause}`,
     link: { words: found.page === '/power' ? 'Look at its circuit' : 'Look at its climate', page: found.page },
     tierId: null,
+    remedy: found.text,
   };
 }
 
@@ -143,6 +157,7 @@ function well({ doc, tentName }: Case): TentWords {
     clause: `the ${tentName} is well`,
     link: null,
     tierId: null,
+    remedy: null,
   };
 }
 

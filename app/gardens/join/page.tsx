@@ -10,6 +10,7 @@ export default async function JoinPage() {
   if (!(await getActor())) redirect('/sign-in?callbackUrl=/gardens/join' as Route);
   return (
     <PageFrame
+      current="join"
       crumbs={[{ words: 'Your gardens', href: '/gardens' }, { words: 'join one' }]}
       headline="Join a garden with a code."
       lead="An owner makes the code, for one person and seven days. It says what you may do there."

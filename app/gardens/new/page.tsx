@@ -13,6 +13,7 @@ export default async function NewGardenPage({ searchParams }: { searchParams: Pr
   const keeping = keep === 'drawing';
   return (
     <PageFrame
+      current="new"
       crumbs={[{ words: 'Your gardens', href: '/gardens' }, { words: 'a new garden' }]}
       headline={keeping ? 'Your drawing gets a garden to stand in.' : 'A garden of your own.'}
       lead="You are its owner. Nobody else sees it until you give them a code."

@@ -61,16 +61,24 @@ export function cropSources({ crops }: Reference): TableRow[] {
 }
 
 export function priceSources({ prices }: Reference): TableRow[] {
-  const works = new Map<string, { count: number; known: Set<string> }>();
+  const works = new Map<string, { count: number; known: Set<ShownStanding> }>();
   for (const price of prices) {
     const work = works.get(price.source) ?? { count: 0, known: new Set() };
     work.count += 1;
-    work.known.add(price.knownHow);
+    work.known.add(price.standing);
     works.set(price.source, work);
   }
   return [...works].map(([source, { count, known }]) => ({
     work: <span className="font-normal">{source}</span>,
     figures: String(count),
-    standing: [...known].filter(Boolean).join('; '),
+    standing: (
+      <>
+        {[...known].map((standing) => (
+          <span key={standing} className="block">
+            <StandingMark standing={standing} />
+          </span>
+        ))}
+      </>
+    ),
   }));
 }

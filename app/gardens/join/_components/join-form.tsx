@@ -33,7 +33,12 @@ export function JoinForm() {
     }
   };
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0">
+    <form
+      method="post"
+      noValidate
+      onSubmit={(event) => void submit(event)}
+      className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0"
+    >
       <TextField
         label="Code"
         className="w-96"

@@ -81,7 +81,12 @@ export function NewGardenForm({ keeping, units: first }: { keeping: boolean; uni
     }
   };
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0">
+    <form
+      method="post"
+      noValidate
+      onSubmit={(event) => void submit(event)}
+      className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0"
+    >
       <TextField
         label="Name of the garden"
         className="w-96"

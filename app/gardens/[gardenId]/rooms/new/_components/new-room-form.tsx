@@ -68,7 +68,12 @@ export function NewRoomForm({ gardenId, dollars }: { gardenId: string; dollars: 
     }
   };
   return (
-    <form method="post" noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0">
+    <form
+      method="post"
+      noValidate
+      onSubmit={(event) => void submit(event)}
+      className="flex flex-col gap-5 pt-8 pl-55 max-lg:pl-0"
+    >
       <TextField
         label="Name of the room"
         className="w-96"
