@@ -24,10 +24,10 @@ export async function build({ env, tell = () => {} }) {
 }
 
 /** Builds only when something that the build reads has changed since the last finished one. */
-export async function buildOnce({ env, tell }) {
-  const stampFile = path.join(root, '.next', 'cellarsun-sources');
+export async function buildOnce({ env, tell, folder = '.next' }) {
+  const stampFile = path.join(root, folder, 'cellarsun-sources');
   const mark = hashOf(BUILD_INPUTS);
-  const whole = existsSync(path.join(root, '.next', 'BUILD_ID'));
+  const whole = existsSync(path.join(root, folder, 'BUILD_ID'));
   if (whole && existsSync(stampFile) && readFileSync(stampFile, 'utf8') === mark) return 'nothing changed';
   rmSync(stampFile, { force: true });
   await build({ env, tell });

@@ -6,13 +6,10 @@
  * SOAK_KILLS says how many ends; every third one is the database's.
  */
 import { randomUUID } from 'node:crypto';
-import path from 'node:path';
 import { signal } from './processes.mjs';
-import { run } from './run.mjs';
 import { say, step } from './say.mjs';
-import { root } from './sources.mjs';
 import { startCluster } from './cluster.mjs';
-import { arrangeServer, buildEnvironment, signIn } from './test-server.mjs';
+import { arrangeServer, buildForMeasuring, signIn } from './test-server.mjs';
 import { throwAwayCluster } from './throw-away.mjs';
 
 const KILLS = Number(process.env.SOAK_KILLS ?? 21);
@@ -102,10 +99,7 @@ function groupBy(rows) {
 }
 
 async function soak(toStop) {
-  await step('Build', async () => {
-    const next = path.join(root, 'node_modules/next/dist/bin/next');
-    await run(process.execPath, [next, 'build'], { cwd: root, env: buildEnvironment(base) });
-  });
+  await step('Build', (tell) => buildForMeasuring({ base, tell }));
   const database = await throwAwayCluster({ durable: true });
   toStop.push(database.remove);
   const server = await arrangeServer({ base, database });

@@ -1,6 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { rmSync } from 'node:fs';
 import path from 'node:path';
+import { buildOnce } from './build.mjs';
 import { freePort } from './ports.mjs';
 import { prepareDatabase } from './prepare-database.mjs';
 import { launchApp } from './serve.mjs';
@@ -15,6 +16,10 @@ export const buildEnvironment = (base) => ({
   ...testBuildEnvironment({ name: 'next', env: base }),
   NODE_ENV: 'production',
 });
+
+/** Builds into the tests' folder unless just these sources were built there; for measurements, not for the tests. */
+export const buildForMeasuring = ({ base, tell }) =>
+  buildOnce({ env: buildEnvironment(base), tell, folder: '.data/test/next' });
 
 /** A database, prepared with the demo, and what the app needs to serve it at an address of its own. */
 export async function arrangeServer({ base, database }) {
