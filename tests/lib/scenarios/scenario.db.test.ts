@@ -179,6 +179,7 @@ describe('the scenarios of a tent', () => {
         deleteScenario(garden.owner, second.scenarioId),
       ]);
       expect(both.map((each) => each.status).sort()).toEqual(['fulfilled', 'rejected']);
+      for (const each of both) if (each.status === 'rejected') expect(each.reason).toMatchObject({ code: 'in-use' });
       const left = await listScenarios(garden.owner, tent.tentId);
       expect(left).toHaveLength(1);
       expect((await getTent(garden.owner, tent.tentId)).currentScenarioId).toBe(left[0]!.scenarioId);
