@@ -1,20 +1,29 @@
-import { dewPoint } from '../air/psychrometrics';
+import { dewPoint, saturationPressure } from '../air/psychrometrics';
 import type { TierLight } from '../light/tier-light';
-import type { HeatResult, HeatState, HotState } from '../plan/evaluation-document';
+import type { CircuitResult, HeatResult, HeatState, HotState } from '../plan/evaluation-document';
 import { lampSegments, type LampSegment } from '../plan/lamp-groups';
 import type { ResolvedScenario } from '../plan/resolved-scenario';
-import { percentile } from '../light/tier-light';
+import { CONTINUOUS_SHARE } from '../power/circuit-load';
+import { freeFloat } from './free-float';
 import { FAN_SIZES_M3H, HEATER_MARGIN, HEATER_SIZES_W, sizeUp } from './recommended-size';
 import { pumpShare, tentModel, waterSource } from './tent-model';
-import { airflowFor, roomSide, tentState, type RoomAir, type TentModel, type TentState } from './tent-state';
+import { airflowFor, COLDEST_C, temperatureFor } from './settled-state';
+import { roomSide, stateBeside, tentAir, tentState, type RoomAir, type TentModel, type TentState } from './tent-state';
 
 interface Year {
   roomTempC: Float64Array;
   roomRelHumidityPct: Float64Array;
+  /** 1st and 99th percentile of the hours. */
+  coldTempC: number;
+  hotTempC: number;
 }
 
 /** The room in the hour whose temperature comes nearest to the wanted one, so that its humidity belongs to it. */
-function roomAt(scenario: ResolvedScenario, { roomTempC, roomRelHumidityPct }: Year, tempC: number): RoomAir {
+export function roomAt(
+  scenario: ResolvedScenario,
+  { roomTempC, roomRelHumidityPct }: Pick<Year, 'roomTempC' | 'roomRelHumidityPct'>,
+  tempC: number,
+): RoomAir {
   let nearest = 0;
   for (let hour = 1; hour < roomTempC.length; hour += 1) {
     if (Math.abs(roomTempC[hour]! - tempC) < Math.abs(roomTempC[nearest]! - tempC) - 1e-12) nearest = hour;
@@ -34,7 +43,9 @@ interface Sides {
   room: RoomAir;
 }
 
-const DARK: Pick<LampSegment, 'on' | 'lampInsideW'> = { on: [], lampInsideW: 0 };
+type Lamps = Pick<LampSegment, 'on' | 'lampInsideW'>;
+
+const DARK: Lamps = { on: [], lampInsideW: 0 };
 
 function gains(scenario: ResolvedScenario, lampsW: number) {
   const circulationW = scenario.climate.circulationW;
@@ -44,9 +55,9 @@ function gains(scenario: ResolvedScenario, lampsW: number) {
 
 function coldState(
   { scenario, lights, tent, room }: Sides,
-  lamps: Pick<LampSegment, 'on' | 'lampInsideW'>,
+  lamps: Lamps,
   tempC: number,
-): { out: HeatState; state: TentState } {
+): { out: HeatState; state: TentState; lamps: Lamps } {
   const state = tentState({
     tent,
     room: roomSide(room, tent.pressurePa),
@@ -70,32 +81,38 @@ function coldState(
     airflowM3H: state.airflowM3H,
     evaporationKgH: state.evaporationKgH,
   };
-  return { out, state };
+  return { out, state, lamps };
+}
+
+/** Temperature of the fabric's inner face: the film inside bears its share of the whole drop. */
+export function wallFaceC({ tent }: ResolvedScenario, tempC: number, roomTempC: number): number {
+  return tempC - Math.min(1, tent.wallUWM2K / tent.innerFilmWM2K) * (tempC - roomTempC);
 }
 
 /** How far the fabric's inner face stands above the dew point of the tent's air, K. Below 0 the wall sweats. */
-export function dewMargin(
-  scenario: ResolvedScenario,
-  state: Pick<TentState, 'tempC' | 'vapourPa'>,
-  roomTempC: number,
-): number {
-  const { wallUWM2K, innerFilmWM2K } = scenario.tent;
-  const faceC = state.tempC - Math.min(1, wallUWM2K / innerFilmWM2K) * (state.tempC - roomTempC);
-  return state.vapourPa < 0.01 ? faceC + 100 : faceC - dewPoint(state.vapourPa);
+function dewMargin(scenario: ResolvedScenario, { tempC, vapourPa }: TentState, roomTempC: number): number {
+  const faceC = wallFaceC(scenario, tempC, roomTempC);
+  // Air without any vapour has no dew point; −100 °C stands for it.
+  return vapourPa < 0.01 ? faceC + 100 : faceC - dewPoint(vapourPa);
 }
 
-function hotState(sides: Sides, all: Pick<LampSegment, 'on' | 'lampInsideW'>): HotState {
+/** The same as a yes or no, without the dew point: the air holds more vapour than the face would let it. */
+export function wallSweats(scenario: ResolvedScenario, { tempC, vapourPa }: TentState, roomTempC: number): boolean {
+  return vapourPa > saturationPressure(wallFaceC(scenario, tempC, roomTempC));
+}
+
+function hotState(sides: Sides, all: Lamps): HotState {
   const { scenario, lights, tent, room } = sides;
   const tempC = scenario.climate.maxTempC;
   const side = roomSide(room, tent.pressurePa);
-  const source = waterSource(scenario, lights, all.on);
-  const state = tentState({ tent, room: side, source, tempC });
+  const air = tentAir(tent, waterSource(scenario, lights, all.on), tempC);
+  const state = stateBeside({ tent, room: side, air });
   const gain = gains(scenario, all.lampInsideW);
   return {
     roomTempC: room.tempC,
     tentTempC: tempC,
     excessW: Math.max(0, gain.gainW - state.lossW),
-    exhaustAirflowM3H: tempC <= room.tempC ? null : airflowFor({ tent, room: side, source, heatW: gain.gainW, tempC }),
+    exhaustAirflowM3H: tempC <= room.tempC ? null : airflowFor({ tent, room: side, air, heatW: gain.gainW }),
     fabricW: state.fabricW,
     floorW: state.floorW,
     airW: state.airW,
@@ -104,31 +121,62 @@ function hotState(sides: Sides, all: Pick<LampSegment, 'on' | 'lampInsideW'>): H
   };
 }
 
-/** Steady temperature without heater and without plants' water: leakage and the fan's least flow only. */
-function freeFloat({ scenario, tent, room }: Sides, lampsW: number): number {
-  const side = roomSide(room, tent.pressurePa);
-  const airWK = (Math.max(tent.leakageM3H, tent.exhaustMinM3H) / 3600 / side.volumePerKg) * side.capacity;
-  const conductance = tent.fabricWK + tent.floorWK + airWK;
-  const { gainW } = gains(scenario, lampsW);
-  if (conductance === 0) return gainW > 0 ? Infinity : room.tempC;
-  return ((tent.fabricWK + airWK) * room.tempC + tent.floorWK * room.slabTempC + gainW) / conductance;
-}
+/** What hangs on a circuit, but for the heater. */
+type Loaded = Pick<CircuitResult, 'peakA' | 'continuousA'>;
 
 /** The circuit that could carry a heater of this power beside what it carries already; the one meant for heaters first. */
-function circuitFor(
-  scenario: ResolvedScenario,
-  heaterW: number,
-  continuousWithoutHeaterA: readonly number[],
-): string | null {
-  if (heaterW === 0) return scenario.power.circuits[0]?.id ?? null;
+function circuitFor(scenario: ResolvedScenario, heaterW: number, withoutHeater: readonly Loaded[]): string | null {
   const { circuits, supplyV } = scenario.power;
+  const heaterA = heaterW / supplyV;
   const order = circuits
-    .map((circuit, index) => ({ circuit, index }))
+    .map((circuit, index) => ({ circuit, loaded: withoutHeater[index]! }))
     .sort((a, b) => Number(b.circuit.carries.includes('heater')) - Number(a.circuit.carries.includes('heater')));
   const found = order.find(
-    ({ circuit, index }) => continuousWithoutHeaterA[index]! + heaterW / supplyV <= 0.8 * circuit.ratingA + 1e-9,
+    ({ circuit, loaded }) =>
+      loaded.continuousA + heaterA <= CONTINUOUS_SHARE * circuit.ratingA + 1e-9 &&
+      loaded.peakA + heaterA <= circuit.ratingA + 1e-9,
   );
-  return found?.circuit.id ?? null;
+  return (found ?? (heaterW === 0 ? order[0] : undefined))?.circuit.id ?? null;
+}
+
+/** Where the tent settles in the worst of the cold states with the heater that is planned, °C. */
+function slipTemperature(sides: Sides, states: readonly { out: HeatState; lamps: Lamps }[]): number | null {
+  const { scenario, lights, tent, room } = sides;
+  const ratedW = scenario.climate.heater?.ratedPowerW ?? 0;
+  const short = states.filter(({ out }) => out.heaterW > ratedW);
+  if (short.length === 0) return null;
+  const settled = short.map(
+    ({ out, lamps }) =>
+      temperatureFor({
+        tent,
+        room: roomSide(room, tent.pressurePa),
+        source: waterSource(scenario, lights, lamps.on),
+        heatW: out.gainW + ratedW,
+        lowC: COLDEST_C,
+        highC: out.tentTempC,
+      }).tempC,
+  );
+  return Math.min(...settled);
+}
+
+interface Design {
+  heat: HeatResult;
+  /** What the tent slips to in the coldest hours with the heater that is planned; null where it holds. */
+  slipTempC: number | null;
+}
+
+function inputInsideW(scenario: ResolvedScenario): number {
+  const fixtures = new Map(scenario.fixtures.map((fixture) => [fixture.id, fixture]));
+  return scenario.placements.reduce((sum, placement) => {
+    const fixture = fixtures.get(placement.fixture)!;
+    return sum + fixture.inputPowerW * placement.dimFrac * (1 - fixture.driverOutsideFrac);
+  }, 0);
+}
+
+function recommendedExhaust(hot: HotState, moisture: readonly (number | null)[]): number | null {
+  const airflows = [hot.excessW > 0 ? hot.exhaustAirflowM3H : 0, ...moisture];
+  if (airflows.includes(null)) return null;
+  return sizeUp(Math.max(...airflows.map((each) => each ?? 0)), FAN_SIZES_M3H);
 }
 
 /**
@@ -140,51 +188,45 @@ export function designStates({
   scenario,
   lights,
   year,
-  continuousWithoutHeaterA,
+  withoutHeater,
 }: {
   scenario: ResolvedScenario;
   lights: readonly TierLight[];
   year: Year;
-  continuousWithoutHeaterA: readonly number[];
-}): HeatResult {
+  withoutHeater: readonly Loaded[];
+}): Design {
   const tent = tentModel(scenario);
-  const coldRoom = roomAt(scenario, year, scenario.room.designTempC ?? percentile(year.roomTempC, 0.01));
-  const hotRoom = roomAt(scenario, year, scenario.room.hotDayTempC ?? percentile(year.roomTempC, 0.99));
+  const coldRoom = roomAt(scenario, year, scenario.room.designTempC ?? year.coldTempC);
+  const hotRoom = roomAt(scenario, year, scenario.room.hotDayTempC ?? year.hotTempC);
   const cold: Sides = { scenario, lights, tent, room: coldRoom };
   const day = lampSegments(scenario)
     .filter((segment) => segment.isDay)
     .sort((a, b) => a.lampW - b.lampW);
   const { dayTempC, nightTempC } = scenario.climate;
-  const all = scenario.placements.map((_, index) => index);
-  const allInsideW = scenario.placements.reduce((sum, placement) => {
-    const fixture = scenario.fixtures.find((each) => each.id === placement.fixture)!;
-    return sum + fixture.inputPowerW * placement.dimFrac * (1 - fixture.driverOutsideFrac);
-  }, 0);
-  const everything = { on: all, lampInsideW: allInsideW };
+  const everything: Lamps = { on: scenario.placements.map((_, index) => index), lampInsideW: inputInsideW(scenario) };
 
   const dark = coldState(cold, DARK, nightTempC);
   const dawn = day.length > 0 ? coldState(cold, day[0]!, dayTempC) : dark;
   const light = day.length > 0 ? coldState(cold, day.at(-1)!, dayTempC) : dark;
+  const states = [dark, dawn, light];
   const hotLight = hotState({ ...cold, room: hotRoom }, everything);
-  const needW = Math.max(dark.out.heaterW, dawn.out.heaterW, light.out.heaterW);
+  const needW = Math.max(...states.map(({ out }) => out.heaterW));
   const recommendedHeaterW = sizeUp(needW * HEATER_MARGIN, HEATER_SIZES_W);
-  const airflows = [
-    hotLight.excessW > 0 ? hotLight.exhaustAirflowM3H : 0,
-    dark.state.moistureAirflowM3H,
-    light.state.moistureAirflowM3H,
-  ];
-  return {
+  const moistureAirflowM3H = { light: light.state.moistureAirflowM3H, dark: dark.state.moistureAirflowM3H };
+  const heat: HeatResult = {
     coldDark: dark.out,
     coldDawn: dawn.out,
     coldLight: light.out,
     recommendedHeaterW,
-    recommendedHeaterCircuit: circuitFor(scenario, recommendedHeaterW, continuousWithoutHeaterA),
-    recommendedExhaustM3H: airflows.includes(null)
-      ? null
-      : sizeUp(Math.max(...airflows.map((each) => each ?? 0)), FAN_SIZES_M3H),
+    recommendedHeaterCircuit: circuitFor(scenario, recommendedHeaterW, withoutHeater),
+    recommendedExhaustM3H: recommendedExhaust(hotLight, Object.values(moistureAirflowM3H)),
     hotLight,
-    freeFloatTempC: { light: freeFloat(cold, allInsideW), dark: freeFloat(cold, 0) },
-    moistureAirflowM3H: { light: light.state.moistureAirflowM3H, dark: dark.state.moistureAirflowM3H },
-    wallDewMarginK: Math.min(...[dark, dawn, light].map(({ state }) => dewMargin(scenario, state, coldRoom.tempC))),
+    freeFloatTempC: {
+      light: freeFloat({ tent, room: coldRoom, gainW: gains(scenario, everything.lampInsideW).gainW }).tempC,
+      dark: freeFloat({ tent, room: coldRoom, gainW: gains(scenario, 0).gainW }).tempC,
+    },
+    moistureAirflowM3H,
+    wallDewMarginK: Math.min(...states.map(({ state }) => dewMargin(scenario, state, coldRoom.tempC))),
   };
+  return { heat, slipTempC: slipTemperature(cold, states) };
 }

@@ -1,8 +1,8 @@
+import { airflowFor, COLDEST_C, HOTTEST_C, temperatureFor } from './settled-state';
 import {
-  airflowFor,
-  temperatureFor,
-  tentState,
+  stateBeside,
   type RoomSide,
+  type TentAir,
   type TentModel,
   type TentState,
   type WaterSource,
@@ -13,8 +13,9 @@ interface HourInput {
   room: RoomSide;
   source: WaterSource;
   gainW: number;
-  setTempC: number;
-  maxTempC: number;
+  /** The tent's air at the set-point, and at the warmest that is allowed. */
+  setAir: TentAir;
+  maxAir: TentAir;
   /** 0 where there is none. */
   heaterRatedW: number;
   exhaustMaxM3H: number;
@@ -29,9 +30,7 @@ export interface HourState {
   overK: number;
 }
 
-/** Far beyond what a tent reaches; only bounds the search. */
-const COLDEST_C = -60;
-const HOTTEST_C = 150;
+const calm = (state: TentState): HourState => ({ state, heaterW: 0, unmetK: 0, overK: 0 });
 
 /**
  * The steady state that one set of gains would reach in one hour, with an ideal heater and fan.
@@ -39,43 +38,27 @@ const HOTTEST_C = 150;
  * Too little heat: the heater gives what is missing up to its rating, then the tent slips. Too much: the tent warms freely
  * up to the highest temperature allowed, then the fan opens as far as it goes, then the tent overheats.
  */
-export function hourState({
-  tent,
-  room,
-  source,
-  gainW,
-  setTempC,
-  maxTempC,
-  heaterRatedW,
-  exhaustMaxM3H,
-}: HourInput): HourState {
-  const atSet = tentState({ tent, room, source, tempC: setTempC });
+export function hourState(input: HourInput): HourState {
+  const { tent, room, source, gainW, setAir, maxAir, heaterRatedW, exhaustMaxM3H } = input;
+  const atSet = stateBeside({ tent, room, air: setAir });
   const missingW = atSet.lossW - gainW;
+  const search = { tent, room, source };
   if (missingW >= 0) {
     if (missingW <= heaterRatedW) return { state: atSet, heaterW: missingW, unmetK: 0, overK: 0 };
-    const state = temperatureFor({ tent, room, source, heatW: gainW + heaterRatedW, lowC: COLDEST_C, highC: setTempC });
-    return { state, heaterW: heaterRatedW, unmetK: setTempC - state.tempC, overK: 0 };
+    const heatW = gainW + heaterRatedW;
+    const state = temperatureFor({ ...search, heatW, lowC: COLDEST_C, highC: setAir.tempC, from: atSet });
+    return { state, heaterW: heaterRatedW, unmetK: setAir.tempC - state.tempC, overK: 0 };
   }
-  const warmestC = Math.max(setTempC, maxTempC);
-  const atMost = tentState({ tent, room, source, tempC: warmestC });
+  const atMost = stateBeside({ tent, room, air: maxAir });
   if (atMost.lossW >= gainW) {
-    return {
-      state: temperatureFor({ tent, room, source, heatW: gainW, lowC: setTempC, highC: warmestC }),
-      heaterW: 0,
-      unmetK: 0,
-      overK: 0,
-    };
+    return calm(temperatureFor({ ...search, heatW: gainW, lowC: setAir.tempC, highC: maxAir.tempC, from: atSet }));
   }
-  const needed = airflowFor({ tent, room, source, heatW: gainW, tempC: warmestC });
+  const needed = airflowFor({ tent, room, air: maxAir, heatW: gainW });
   if (needed !== null && needed <= exhaustMaxM3H) {
-    return {
-      state: tentState({ tent, room, source, tempC: warmestC, airflowM3H: needed }),
-      heaterW: 0,
-      unmetK: 0,
-      overK: 0,
-    };
+    return calm(stateBeside({ tent, room, air: maxAir, airflowM3H: needed }));
   }
   const airflowM3H = Math.max(atMost.airflowM3H, exhaustMaxM3H);
-  const state = temperatureFor({ tent, room, source, heatW: gainW, lowC: warmestC, highC: HOTTEST_C, airflowM3H });
-  return { state, heaterW: 0, unmetK: 0, overK: Math.max(0, state.tempC - warmestC) };
+  const from = stateBeside({ tent, room, air: maxAir, airflowM3H });
+  const state = temperatureFor({ ...search, heatW: gainW, lowC: maxAir.tempC, highC: HOTTEST_C, airflowM3H, from });
+  return { ...calm(state), overK: Math.max(0, state.tempC - maxAir.tempC) };
 }

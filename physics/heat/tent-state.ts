@@ -1,5 +1,4 @@
 import {
-  density,
   heatCapacity,
   humidityRatio,
   latentHeat,
@@ -55,11 +54,41 @@ function evaporationOf(source: WaterSource, tempC: number, pressurePa: number): 
   return line;
 }
 
+/** The tent's own air at one temperature, whatever the room: made once for a set-point that a whole year returns to. */
+export interface TentAir extends EvaporationLine {
+  tempC: number;
+  saturationPa: number;
+  /** At the highest humidity allowed: vapour pressure, humidity ratio, and what evaporates, kg/s. */
+  allowedPa: number;
+  allowedRatio: number;
+  atLimitKgS: number;
+  latentJKg: number;
+}
+
+export function tentAir(tent: TentModel, source: WaterSource, tempC: number): TentAir {
+  const { pressurePa } = tent;
+  const saturationPa = saturationPressure(tempC);
+  const { still, slope } = evaporationOf(source, tempC, pressurePa);
+  const allowedPa = (tent.maxRelHumidityPct / 100) * saturationPa;
+  return {
+    tempC,
+    saturationPa,
+    still,
+    slope,
+    allowedPa,
+    // Near the boiling point even this humidity would be all vapour: no air need be changed for it.
+    allowedRatio: allowedPa < pressurePa ? humidityRatio({ vapourPa: allowedPa, pressurePa }) : Infinity,
+    atLimitKgS: Math.max(0, still - slope * allowedPa),
+    latentJKg: latentHeat(tempC),
+  };
+}
+
 /** Everything about a tent held at one temperature beside one room. */
 export interface TentState {
   tempC: number;
   relHumidityPct: number;
   vapourPa: number;
+  saturationPa: number;
   fabricW: number;
   floorW: number;
   airW: number;
@@ -79,14 +108,15 @@ export interface RoomSide extends RoomAir {
   ratio: number;
   /** m³ of room air for each kg of dry air. */
   volumePerKg: number;
+  /** J/K for each kg of dry air. */
   capacity: number;
-  densityKgM3: number;
 }
 
 export function roomSide(room: RoomAir, pressurePa: number): RoomSide {
+  const { tempC, relHumidityPct, slabTempC } = room;
   const ratio = humidityRatio({ vapourPa: vapourPressure(room), pressurePa });
-  const air = { tempC: room.tempC, ratio, pressurePa };
-  return { ...room, ratio, volumePerKg: specificVolume(air), capacity: heatCapacity(ratio), densityKgM3: density(air) };
+  const volumePerKg = specificVolume({ tempC, ratio, pressurePa });
+  return { tempC, relHumidityPct, slabTempC, ratio, volumePerKg, capacity: heatCapacity(ratio) };
 }
 
 interface StateInput {
@@ -95,7 +125,14 @@ interface StateInput {
   source: WaterSource;
   tempC: number;
   /** Whole air exchange, m³/h; left out, it is what leakage, the fan's minimum and the humidity ask for. */
-  airflowM3H?: number;
+  airflowM3H?: number | undefined;
+}
+
+interface BesideInput {
+  tent: TentModel;
+  room: RoomSide;
+  air: TentAir;
+  airflowM3H?: number | undefined;
 }
 
 /**
@@ -109,40 +146,42 @@ interface StateInput {
  * @source energy and mass balance; [ASHRAE2017] for air, [Graamans2017] and [POOL1998] for water
  * @accuracy exact for its inputs; fabric U ± 20 %, transpiration ± 40 %
  */
-export function tentState({ tent, room, source, tempC, airflowM3H }: StateInput): TentState {
+export const tentState = ({ tent, room, source, tempC, airflowM3H }: StateInput): TentState =>
+  stateBeside({ tent, room, air: tentAir(tent, source, tempC), airflowM3H });
+
+/** The same for air that has been made ready. */
+export function stateBeside({ tent, room, air, airflowM3H }: BesideInput): TentState {
   const { pressurePa } = tent;
-  const saturationPa = saturationPressure(tempC);
-  const line = evaporationOf(source, tempC, pressurePa);
+  const { tempC, still, slope, saturationPa } = air;
   const toKgS = 1 / (3600 * room.volumePerKg);
 
-  const allowedPa = (tent.maxRelHumidityPct / 100) * saturationPa;
-  // Near the boiling point even this humidity would be all vapour: no air need be changed for it.
-  const allowedRatio = allowedPa < pressurePa ? humidityRatio({ vapourPa: allowedPa, pressurePa }) : Infinity;
-  const atLimit = Math.max(0, line.still - line.slope * allowedPa);
   const moistureAirflowM3H =
-    atLimit === 0 ? 0 : allowedRatio > room.ratio ? atLimit / (allowedRatio - room.ratio) / toKgS : null;
-
+    air.atLimitKgS === 0
+      ? 0
+      : air.allowedRatio > room.ratio
+        ? air.atLimitKgS / (air.allowedRatio - room.ratio) / toKgS
+        : null;
   const least = Math.max(tent.leakageM3H, tent.exhaustMinM3H);
   const most = Math.max(least, tent.exhaustMaxM3H);
   const exchange = airflowM3H ?? Math.min(most, Math.max(least, moistureAirflowM3H ?? least));
   const dryAirKgS = exchange * toKgS;
-  const balanced = balancedVapourPressure({ ...line, dryAirKgS, roomRatio: room.ratio, pressurePa, saturationPa });
   // Without any exchange and without evaporation the air keeps the room's moisture.
   const vapourPa =
-    dryAirKgS === 0 && line.still === 0 && line.slope === 0
+    dryAirKgS === 0 && still === 0 && slope === 0
       ? Math.min(saturationPa, vapourPressureOfRatio({ ratio: room.ratio, pressurePa }))
-      : balanced;
-  const evaporationKgS = Math.max(0, line.still - line.slope * vapourPa);
+      : balancedVapourPressure({ still, slope, dryAirKgS, roomRatio: room.ratio, pressurePa, saturationPa });
+  const evaporationKgS = Math.max(0, still - slope * vapourPa);
 
   const rise = tempC - room.tempC;
   const fabricW = tent.fabricWK * rise;
   const floorW = tent.floorWK * (tempC - room.slabTempC);
   const airW = dryAirKgS * room.capacity * rise;
-  const latentW = evaporationKgS * latentHeat(tempC);
+  const latentW = evaporationKgS * air.latentJKg;
   return {
     tempC,
     relHumidityPct: (100 * vapourPa) / saturationPa,
     vapourPa,
+    saturationPa,
     fabricW,
     floorW,
     airW,
@@ -152,72 +191,6 @@ export function tentState({ tent, room, source, tempC, airflowM3H }: StateInput)
     airflowM3H: exchange,
     evaporationKgH: evaporationKgS * 3600,
     moistureAirflowM3H,
-    tooHumid: vapourPa > allowedPa * (1 + 1e-9),
+    tooHumid: vapourPa > air.allowedPa * (1 + 1e-9),
   };
-}
-
-/** Temperature at which the losses, the exchange following the humidity, equal a heat input. Losses rise with temperature. */
-export function temperatureFor({
-  tent,
-  room,
-  source,
-  heatW,
-  lowC,
-  highC,
-  airflowM3H,
-}: Omit<StateInput, 'tempC'> & { heatW: number; lowC: number; highC: number }): TentState {
-  const at = (tempC: number) =>
-    tentState({ tent, room, source, tempC, ...(airflowM3H !== undefined && { airflowM3H }) });
-  let low = at(lowC);
-  let high = at(highC);
-  let lowError = low.lossW - heatW;
-  let highError = high.lossW - heatW;
-  if (lowError >= 0) return low;
-  if (highError <= 0) return high;
-  // Regula falsi after Illinois: an end that stays twice has its error halved, so that the search never creeps.
-  let stayed = 0;
-  for (let i = 0; i < 80; i += 1) {
-    const middle = at((low.tempC * highError - high.tempC * lowError) / (highError - lowError));
-    const error = middle.lossW - heatW;
-    if (Math.abs(error) < 1e-7 * Math.max(1, Math.abs(heatW)) || high.tempC - low.tempC < 1e-10) return middle;
-    if (error < 0) {
-      low = middle;
-      lowError = error;
-      if (stayed === 1) highError /= 2;
-      stayed = 1;
-    } else {
-      high = middle;
-      highError = error;
-      if (stayed === -1) lowError /= 2;
-      stayed = -1;
-    }
-  }
-  return at((low.tempC + high.tempC) / 2);
-}
-
-/** The exchange that keeps a tent at a temperature against a heat input; null where no exchange can, for the room is as warm. */
-export function airflowFor({
-  tent,
-  room,
-  source,
-  heatW,
-  tempC,
-}: Omit<StateInput, 'airflowM3H'> & { heatW: number }): number | null {
-  const loss = (airflowM3H: number) => tentState({ tent, room, source, tempC, airflowM3H }).lossW;
-  const usual = tentState({ tent, room, source, tempC });
-  if (usual.lossW >= heatW) return usual.airflowM3H;
-  if (tempC - room.tempC < 1e-9) return null;
-  let low = usual.airflowM3H;
-  let high = Math.max(100, 2 * low);
-  while (loss(high) < heatW) {
-    low = high;
-    high *= 4;
-    if (high > 1e9) return null;
-  }
-  while (high - low > 1e-9 * high) {
-    const middle = (low + high) / 2;
-    if (loss(middle) < heatW) low = middle;
-    else high = middle;
-  }
-  return (low + high) / 2;
 }

@@ -50,7 +50,7 @@ function clearance({ scenario }: CautionFacts): Caution[] {
   ];
 }
 
-function sizing({ scenario, heat }: CautionFacts): Caution[] {
+function sizing({ scenario, heat, slipTempC }: CautionFacts): Caution[] {
   const ratedW = scenario.climate.heater?.ratedPowerW ?? 0;
   const needW = Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW);
   if (needW > ratedW + 0.5) {
@@ -59,7 +59,7 @@ function sizing({ scenario, heat }: CautionFacts): Caution[] {
         code: 'heater.short',
         severity: 'warning',
         where: 'climate.heater',
-        text: `In the coldest hours ${rounded(needW - ratedW)} W are missing: ${ratedW > 0 ? `the heater gives ${rounded(ratedW)} of ${rounded(needW)} W` : `no heater is planned and ${rounded(needW)} W are needed`}. Insulating the tent or warming the room may be safer than a bigger heater.`,
+        text: `In the coldest hours ${rounded(needW - ratedW)} W are missing: ${ratedW > 0 ? `the heater gives ${rounded(ratedW)} of ${rounded(needW)} W` : `no heater is planned and ${rounded(needW)} W are needed`}${slipTempC === null ? '' : `, so the tent slips to ${rounded(slipTempC, 1)} °C`}. Insulating the tent or warming the room may be safer than a bigger heater.`,
         source: 'Computed from the coldest room temperature',
       },
     ];
@@ -78,6 +78,20 @@ function sizing({ scenario, heat }: CautionFacts): Caution[] {
   return [];
 }
 
+/** Water about a heater: trays that flood, a reservoir, leaves that drip. */
+function damp({ scenario }: CautionFacts): Caution[] {
+  if (scenario.water.pumpW === 0 && scenario.water.reservoirL === 0) return [];
+  return [
+    {
+      code: 'heater.damp',
+      severity: 'warning',
+      where: 'climate.heater',
+      text: 'Trays, hoses and a reservoir share this tent. A heater belongs in damp or splashing air only if its maker allows that; else stand it where no water can reach it.',
+      source: `${sources.CPSC_HEATER.citation}; the maker’s instructions decide`,
+    },
+  ];
+}
+
 /** A portable heater in or beside a fabric tent: what fire services and makers ask. */
 export function heaterCautions(facts: CautionFacts): Caution[] {
   const { scenario, heat } = facts;
@@ -87,6 +101,7 @@ export function heaterCautions(facts: CautionFacts): Caution[] {
   return [
     ...clearance(facts),
     ...sizing(facts),
+    ...damp(facts),
     ...(nights
       ? [
           {

@@ -43,13 +43,23 @@ function tierCautions({ scenario, tiers }: CautionFacts): Caution[] {
         source: 'The crop’s reference, see its row',
       });
     }
-    if ((tier.strayPpfdUmolM2S ?? 0) > STRAY_LIMIT) {
+    // Only a crop whose day has a longest length is known to mind light at night.
+    if ((tier.strayPpfdUmolM2S ?? 0) > STRAY_LIMIT && photoperiodMaxH !== undefined && photoperiodMaxH < 24) {
       cautions.push({
         code: 'light.stray',
         severity: 'note',
         where,
         text: `${name}: other lamps put ${rounded(tier.strayPpfdUmolM2S!, 1)} µmol/m²/s into its dark hours. Crops that count the night take that for day; set the timers alike or shade the tier.`,
         source: 'Runkle, long-day lighting: 1 to 2 µmol/m²/s is enough; lower limit judged',
+      });
+    }
+    if (tier.verdict === 'above') {
+      cautions.push({
+        code: 'light.above',
+        severity: 'note',
+        where,
+        text: `${name}: ${rounded(tier.dliMolM2D.mean, 1)} mol a day; ${target.crop} wants ${rounded(target.dliHighMolM2D, 1)} at most. Fewer hours, dimming or more height saves power and spares the leaves.`,
+        source: 'The crop’s reference, see its row',
       });
     }
     if (tier.verdict === 'below' && tier.dliMolM2D.mean < HOPELESS_SHARE * target.dliLowMolM2D) {

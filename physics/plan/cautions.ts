@@ -12,6 +12,8 @@ export interface CautionFacts {
   /** All zero while a lamp is being dragged. */
   year: YearResult;
   circuits: CircuitResult[];
+  /** What the tent slips to in the coldest hours with the heater that is planned; null where it holds. */
+  slipTempC: number | null;
 }
 
 export const rounded = (value: number, digits = 0): string => value.toFixed(digits).replace('-', '−');

@@ -1,23 +1,30 @@
 import { designStates } from '../heat/design-states';
 import { boxOf } from '../heat/tent-model';
+import { COLDEST_C, HOTTEST_C } from '../heat/settled-state';
 import { FABRIC_CAPACITY_J_K, heaterCycles } from '../heat/thermostat';
 import { REFLECTED_IS_AN_ESTIMATE } from '../light/evaluate-light-scene';
 import type { LightCache } from '../light/light-field';
 import { solveTierLight, type TierLight } from '../light/tier-light';
+import { roomYear, type RoomYear } from '../room/room-year';
 import { cautionsFor } from './cautions';
 import { circuitResults } from './circuits';
-import type { Evaluation, HeatResult, MonthResult, YearResult } from './evaluation-document';
+import type { Assumption, Evaluation, HeatResult, MonthResult, YearResult } from './evaluation-document';
 import { physicsVersion } from './physics-version';
 import { resolveScenario } from './resolve-scenario';
 import type { ResolvedScenario } from './resolved-scenario';
 import type { ScenarioDocument } from './scenario-document';
 import { tierResults } from './tier-results';
-import { roomYear, simulateYear, type RoomYear } from './year';
+import { roomSides, simulateYear, yearEnergyKwh } from './year';
 
 export interface EvaluateOptions {
   /** false leaves the year at zero: light and design states alone, for a lamp that is being dragged. */
   year?: boolean;
-  lightCache?: LightCache;
+  /**
+   * Every how many days of the year one is reckoned and stands for the others: 1 unless a rough year will do, as for the range of
+   * a figure. A rough year leaves `netLightEnergyKwh` at 0.
+   */
+  dayStep?: number;
+  lightCache?: LightCache | undefined;
 }
 
 /** What is placed and not had already, in minor units. */
@@ -91,17 +98,39 @@ function wholeYear(
   lights: readonly TierLight[],
   room: RoomYear,
   heat: HeatResult,
+  dayStep: number,
 ): YearResult {
-  const year = simulateYear(scenario, lights, room);
-  const dark = simulateYear(darkened(scenario), darkenedLight(lights), room);
+  const rooms = roomSides(scenario, room);
+  const year = simulateYear({ scenario, lights, rooms, dayStep });
+  const cycles = { heaterCyclesPerH: cyclesOf(scenario, heat) };
+  if (dayStep > 1) return { ...year, ...cycles };
+  const darkKwh = yearEnergyKwh({ scenario: darkened(scenario), lights: darkenedLight(lights), rooms });
   return {
     ...year,
-    netLightEnergyKwh: year.energyKwh.total - dark.energyKwh.total,
-    heaterCyclesPerH: cyclesOf(scenario, heat),
+    ...cycles,
+    netLightEnergyKwh: year.energyKwh.total - darkKwh,
   };
 }
 
-function warningsOf(scenario: ResolvedScenario, heat: HeatResult, withYear: boolean): string[] {
+/** Where the coldest and the hottest room are not given, the year's own hours give them. */
+function designAssumptions(
+  { room }: ResolvedScenario,
+  { coldTempC, hotTempC }: Pick<RoomYear, 'coldTempC' | 'hotTempC'>,
+): Assumption[] {
+  const from = (path: string, value: number, nth: string): Assumption => ({
+    path,
+    value,
+    unit: '°C',
+    source: `${nth} percentile of the room’s hours`,
+    standing: 'computed',
+  });
+  return [
+    ...(room.designTempC === undefined ? [from('room.designTempC', coldTempC, '1st')] : []),
+    ...(room.hotDayTempC === undefined ? [from('room.hotDayTempC', hotTempC, '99th')] : []),
+  ];
+}
+
+function warningsOf(scenario: ResolvedScenario, heat: HeatResult, year: YearResult, withYear: boolean): string[] {
   const warnings: string[] = [];
   const { reflectance } = scenario.tent;
   if (scenario.placements.length > 0 && Object.values(reflectance).some((value) => value > 0))
@@ -110,6 +139,12 @@ function warningsOf(scenario: ResolvedScenario, heat: HeatResult, withYear: bool
     warnings.push(
       'The year is a steady balance of each hour; what the tent stores from one hour to the next is left out.',
     );
+  if (withYear && year.months.some(({ airTempC }) => airTempC.min <= COLDEST_C || airTempC.max >= HOTTEST_C))
+    warnings.push(
+      `In some hours nothing holds the tent's temperature: it is reckoned no further than ${COLDEST_C} and ${HOTTEST_C} °C. Check the lamps' watts and what the fabric, the floor and the air let through.`,
+    );
+  if (heat.freeFloatTempC.light === null || heat.freeFloatTempC.dark === null)
+    warnings.push('Nothing lets heat out of this tent, so unheated it has no steady temperature.');
   const tooMoist = [
     heat.moistureAirflowM3H.dark === null ? 'night' : null,
     heat.moistureAirflowM3H.light === null ? 'day' : null,
@@ -135,19 +170,17 @@ function warningsOf(scenario: ResolvedScenario, heat: HeatResult, withYear: bool
  */
 export function evaluateScenario(
   document: ScenarioDocument,
-  { year: withYear = true, lightCache }: EvaluateOptions = {},
+  { year: withYear = true, dayStep = 1, lightCache }: EvaluateOptions = {},
 ): Evaluation {
   const { scenario, assumptions } = resolveScenario(document);
   const lights = solveTierLight(scenario, lightCache);
   const room = roomYear(scenario);
-  const continuousWithoutHeaterA = circuitResults(scenario, { without: 'heater' }).map(
-    (circuit) => circuit.continuousA,
-  );
-  const heat = designStates({ scenario, lights, year: room, continuousWithoutHeaterA });
+  const withoutHeater = circuitResults(scenario, { without: 'heater' });
+  const { heat, slipTempC } = designStates({ scenario, lights, year: room, withoutHeater });
   const facts = {
     tiers: tierResults(scenario, lights),
     heat,
-    year: withYear ? wholeYear(scenario, lights, room, heat) : emptyYear(),
+    year: withYear ? wholeYear(scenario, lights, room, heat, dayStep) : emptyYear(),
     circuits: circuitResults(scenario),
   };
   return {
@@ -155,9 +188,9 @@ export function evaluateScenario(
     physicsVersion,
     ...facts,
     upFront: { costMinor: upFrontMinor(scenario) },
-    cautions: cautionsFor({ scenario, ...facts }),
-    assumptions,
-    warnings: warningsOf(scenario, heat, withYear),
+    cautions: cautionsFor({ scenario, slipTempC, ...facts }),
+    assumptions: [...assumptions, ...designAssumptions(scenario, room)],
+    warnings: warningsOf(scenario, facts.heat, facts.year, withYear),
     elapsedMs: { light: 0, year: 0 },
   };
 }

@@ -86,7 +86,8 @@ export interface HeatResult {
   /** Smallest listed airflow that meets both the hot day and the moisture, m³/h; null: no fan can. */
   recommendedExhaustM3H: number | null;
   hotLight: HotState;
-  freeFloatTempC: { light: number; dark: number };
+  /** null: nothing lets the heat out, so no temperature is steady. */
+  freeFloatTempC: { light: number | null; dark: number | null };
   moistureAirflowM3H: { light: number | null; dark: number | null };
   wallDewMarginK: number;
 }

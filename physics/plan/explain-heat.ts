@@ -2,6 +2,7 @@ import { sources } from '../sources';
 import { HEATER_MARGIN } from '../heat/recommended-size';
 import type { Evaluation, HeatState } from './evaluation-document';
 import { standingAt, type ExplainContext } from './explain';
+import { explainAir } from './explain-air';
 import type { Explanation, ExplanationTerm } from './explanation';
 import { rangeOf } from './uncertainty';
 
@@ -10,6 +11,7 @@ const METER =
   'Leave a plug-in power meter on the heater for one cold night: its kWh and two thermometers give the tent’s true loss.';
 const SOURCES = [sources.ISO6946.citation, sources.ASHRAE2017.citation, sources.Graamans2017.citation];
 
+const KEYS = ['coldDark', 'coldDawn', 'coldLight'] as const;
 const NAMES = {
   coldDark: 'on the coldest night',
   coldDawn: 'on the coldest morning',
@@ -44,10 +46,10 @@ function stateTerms({ evaluation }: ExplainContext, state: HeatState): Explanati
 
 /** Figures of the design states, by what follows `heat.`. */
 export function explainHeat(context: ExplainContext, path: string, figure: string): Explanation | null {
-  const { document, evaluation, scenario } = context;
+  const { document, evaluation } = context;
   const { heat } = evaluation;
   const common = { path, sources: SOURCES, makesItSurer: METER };
-  const range = (read: (each: Evaluation) => number | null) => rangeOf(document, evaluation, read, false);
+  const range = (read: (each: Evaluation) => number | null) => rangeOf(document, evaluation, read, 'heat', 0);
   const cold = /^(coldDark|coldDawn|coldLight)\.heater$/.exec(figure)?.[1] as keyof typeof NAMES | undefined;
   if (cold) {
     return {
@@ -72,7 +74,7 @@ export function explainHeat(context: ExplainContext, path: string, figure: strin
             value: need,
             unit: 'W',
             label: 'largest of night, morning and day',
-            path: 'heat.coldDark.heater',
+            path: `heat.${KEYS.find((key) => heat[key].heaterW === need)!}.heater`,
             ...computed,
           },
           {
@@ -92,101 +94,7 @@ export function explainHeat(context: ExplainContext, path: string, figure: strin
         ),
       };
     }
-    case 'hotLight.exhaust': {
-      const hot = heat.hotLight;
-      if (hot.exhaustAirflowM3H === null) return null;
-      return {
-        ...common,
-        title: `Air that holds ${scenario.climate.maxTempC} °C on the hot day`,
-        formula: 'airflow = heat left over ÷ (heat capacity of a m³ of room air × warming)',
-        terms: [
-          {
-            operator: '',
-            value: hot.excessW,
-            unit: 'W',
-            label: 'left over after fabric, floor and the usual air',
-            ...computed,
-          },
-          {
-            operator: '÷',
-            value: hot.tentTempC - hot.roomTempC,
-            unit: 'K',
-            label: 'from the room’s air to the tent’s',
-            ...computed,
-          },
-        ],
-        result: { value: hot.exhaustAirflowM3H, unit: 'm³/h' },
-        range: range((each) => each.heat.hotLight.exhaustAirflowM3H),
-        makesItSurer: 'Note the room’s highest temperature over one hot week.',
-      };
-    }
-    case 'moistureAirflow.light':
-    case 'moistureAirflow.dark': {
-      const which = figure.endsWith('light') ? 'light' : 'dark';
-      const value = heat.moistureAirflowM3H[which];
-      if (value === null) return null;
-      const state = which === 'light' ? heat.coldLight : heat.coldDark;
-      return {
-        ...common,
-        title: `Air that holds ${scenario.climate.maxRelHumidityPct} % by ${which === 'light' ? 'day' : 'night'}`,
-        formula: 'airflow = evaporation ÷ (humidity of the tent’s air − of the room’s)',
-        terms: [
-          {
-            operator: '',
-            value: state.evaporationKgH,
-            unit: 'kg/h',
-            label: 'leaves and wet trays give off',
-            standing: 'secondary',
-            source: sources.Graamans2017.citation,
-          },
-        ],
-        result: { value, unit: 'm³/h' },
-        range: range((each) => each.heat.moistureAirflowM3H[which]),
-        makesItSurer: 'Weigh or measure what the reservoir loses in a day.',
-      };
-    }
-    case 'wallDewMargin':
-      return {
-        ...common,
-        title: 'How far the wall is from sweating',
-        formula: 'temperature of the fabric’s inner face − dew point of the tent’s air',
-        terms: [
-          {
-            operator: '',
-            value: heat.wallDewMarginK,
-            unit: 'K',
-            label: 'worst of night, morning and day',
-            ...computed,
-          },
-        ],
-        result: { value: heat.wallDewMarginK, unit: 'K' },
-        range: range((each) => each.heat.wallDewMarginK),
-      };
-    case 'freeFloat.light':
-    case 'freeFloat.dark': {
-      const which = figure.endsWith('light') ? 'light' : 'dark';
-      return {
-        ...common,
-        title: `The tent unheated in the cold, lamps ${which === 'light' ? 'on' : 'off'}`,
-        formula: 'room temperature + gains ÷ (fabric + floor + air, W/K)',
-        terms: [
-          { operator: '', value: heat.coldDark.roomTempC, unit: '°C', label: 'the room', ...computed },
-          {
-            operator: '+',
-            value: heat.freeFloatTempC[which] - heat.coldDark.roomTempC,
-            unit: 'K',
-            label:
-              which === 'light'
-                ? 'from lamps, fan and pump, less the cold floor'
-                : 'from fan and pump, less the cold floor',
-            ...computed,
-          },
-        ],
-        result: { value: heat.freeFloatTempC[which], unit: '°C' },
-        range: range((each) => each.heat.freeFloatTempC[which]),
-      };
-    }
     default:
-      return null;
+      return explainAir(context, path, figure);
   }
 }

@@ -55,7 +55,8 @@ export function explainTier(context: ExplainContext, path: string, tierId: strin
         const found = changed.tiers.find((each) => each.id === tierId);
         return found ? of(found) : null;
       },
-      false,
+      'light',
+      0,
     );
   const { mean, min, max, minOverMean } = tier.ppfdUmolM2S;
   switch (figure) {

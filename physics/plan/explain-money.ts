@@ -50,7 +50,7 @@ export function explainYear(context: ExplainContext, path: string, parts: readon
             : 'cost = bill of household and tent − bill of the household, with tax',
     terms: figure === 'cost' ? deviceTerms(of.costByDevice, currency) : deviceTerms(of.energyKwh, 'kWh'),
     result: figure === 'cost' ? { value: of.cost, unit: currency } : { value: of.energyKwh.total, unit: 'kWh' },
-    range: rangeOf(document, evaluation, read, true),
+    range: rangeOf(document, evaluation, read, 'year'),
     sources: [
       sources.ISO6946.citation,
       sources.Graamans2017.citation,

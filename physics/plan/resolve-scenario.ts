@@ -18,6 +18,12 @@ class Filling {
     return value;
   }
 
+  /** Where nothing is said of the plants' water, the model reckons it. */
+  model(): { kind: 'model' } {
+    this.note('water.transpiration', 'model', '', 'Graamans2017', 'secondary');
+    return { kind: 'model' };
+  }
+
   note(
     path: string,
     value: Assumption['value'],
@@ -74,31 +80,36 @@ function fillTarget(target: Target, path: string, fill: Filling): ResolvedTarget
   };
 }
 
-function fillTier(tier: Tier, index: number, fill: Filling): ResolvedTier {
+function fillTier(tier: Tier, index: number, tentHeightM: number, fill: Filling): ResolvedTier {
   const path = `tiers[${index}]`;
   const take = <K extends keyof Tier>(
     name: K &
       (
-        | 'thicknessM'
         | 'openFrac'
         | 'topReflectanceFrac'
         | 'bottomReflectanceFrac'
         | 'edgeReflectanceFrac'
-        | 'canopyHeightM'
         | 'leafAreaIndex'
         | 'canopyCoverFrac'
       ),
   ) => fill.take(tier[name], `tier.${name}`, `${path}.${name}`);
+  // A default tray is no thicker than the room beneath it, default leaves no higher than the tent.
+  const atMost = (name: 'thicknessM' | 'canopyHeightM', mostM: number): number => {
+    const given = tier[name];
+    if (given !== undefined) return given;
+    const { value, unit, source, standing } = defaults[`tier.${name}`];
+    fill.note(`${path}.${name}`, Math.min(value, mostM), unit, source, standing);
+    return Math.min(value, mostM);
+  };
   return {
     ...tier,
     name: tier.name ?? tier.id,
-    // A tray near the floor is no thicker than the room beneath it.
-    thicknessM: tier.thicknessM ?? Math.min(take('thicknessM'), tier.topHeightM),
+    thicknessM: atMost('thicknessM', tier.topHeightM),
     openFrac: take('openFrac'),
     topReflectanceFrac: take('topReflectanceFrac'),
     bottomReflectanceFrac: take('bottomReflectanceFrac'),
     edgeReflectanceFrac: take('edgeReflectanceFrac'),
-    canopyHeightM: take('canopyHeightM'),
+    canopyHeightM: atMost('canopyHeightM', Math.max(0, tentHeightM - tier.topHeightM)),
     leafAreaIndex: take('leafAreaIndex'),
     canopyCoverFrac: take('canopyCoverFrac'),
     target: tier.target ? fillTarget(tier.target, `${path}.target`, fill) : null,
@@ -156,7 +167,7 @@ function fillWater({ water }: ScenarioDocument, fill: Filling): ResolvedScenario
   return {
     reservoirL: fill.take(water?.reservoirL, 'water.reservoirL', 'water.reservoirL'),
     coveredFrac: fill.take(water?.coveredFrac, 'water.coveredFrac', 'water.coveredFrac'),
-    transpiration: water?.transpiration ?? { kind: 'model' },
+    transpiration: water?.transpiration ?? fill.model(),
     pumpW: water?.pump?.inputPowerW ?? 0,
     flood: {
       minutes: fill.take(flood?.minutes, 'water.flood.minutes', 'water.flood.minutes'),
@@ -205,7 +216,7 @@ export function resolveScenario(document: ScenarioDocument): { scenario: Resolve
     },
     tent: fillTent(document, fill),
     boxes: document.boxes ?? [],
-    tiers: document.tiers.map((tier, index) => fillTier(tier, index, fill)),
+    tiers: document.tiers.map((tier, index) => fillTier(tier, index, document.tent.heightM, fill)),
     fixtures: document.fixtures.map((fixture, index) => fillFixture(fixture, index, fill)),
     placements: document.placements.map((placement, index) => ({
       ...placement,

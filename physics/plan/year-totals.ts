@@ -1,4 +1,3 @@
-import { airVpd } from '../air/psychrometrics';
 import type { TentState } from '../heat/tent-state';
 import { tentCost } from '../power/bill';
 import { daysInMonth } from '../schedule/local-year';
@@ -79,7 +78,7 @@ export class YearTotals {
     }
     widen(sums.temp, state.tempC, hours);
     widen(sums.humidity, state.relHumidityPct, hours);
-    sums.vpdSum += airVpd({ tempC: state.tempC, relHumidityPct: Math.min(100, state.relHumidityPct) }) * hours;
+    sums.vpdSum += ((state.saturationPa - state.vapourPa) / 1000) * hours;
     sums.unmetHeatKh += unmetK * hours;
     sums.overheatKh += overK * hours;
     sums.condensationH += sweats ? hours : 0;
@@ -87,7 +86,10 @@ export class YearTotals {
     this.peakW = Math.max(this.peakW, peakW);
   }
 
-  /** By the clock each device pays for its own hours; on steps, and for a fixed charge, all share by what they draw. */
+  /**
+   * By the clock each device pays for its own hours; on steps, and for a fixed charge, all share by what they draw (in equal
+   * parts where nothing draws).
+   */
   private monthResult(sums: MonthSums, index: number): MonthResult {
     const energyKwh = withTotal(sums.energyKwh);
     const clockCharge = DEVICES.reduce((sum, device) => sum + sums.charge[device], 0);
@@ -97,10 +99,13 @@ export class YearTotals {
       clockCharge,
       daysInMonth: daysInMonth(this.year, index + 1),
     });
-    const weights = clockCharge > 0 ? sums.charge : sums.energyKwh;
-    const weight = DEVICES.reduce((sum, device) => sum + weights[device], 0);
+    const taxed = 1 + (this.power.tariff.taxPct ?? 0) / 100;
+    const shared = cost - clockCharge * taxed;
     const costByDevice = zero();
-    for (const device of DEVICES) costByDevice[device] = weight > 0 ? (cost * weights[device]) / weight : 0;
+    for (const device of DEVICES)
+      costByDevice[device] =
+        sums.charge[device] * taxed +
+        (energyKwh.total > 0 ? (shared * energyKwh[device]) / energyKwh.total : shared / DEVICES.length);
     const mean = (of: { min: number; sum: number; max: number }) => ({
       min: of.min,
       mean: of.sum / sums.hours,

@@ -1,29 +1,24 @@
+import { wallSweats } from '../heat/design-states';
 import { hourState, type HourState } from '../heat/hour-state';
-import { dewMargin } from '../heat/design-states';
 import { pumpShare, tentModel, waterSource } from '../heat/tent-model';
-import { roomSide, type TentModel } from '../heat/tent-state';
+import {
+  roomSide,
+  tentAir,
+  type RoomSide,
+  type TentAir,
+  type TentModel,
+  type TentState,
+  type WaterSource,
+} from '../heat/tent-state';
 import type { TierLight } from '../light/tier-light';
 import { priceAt, priceCuts } from '../power/bill';
-import { hourlyValues } from '../room/series';
+import type { RoomYear } from '../room/room-year';
+import { DAY_MIN } from '../schedule/clock';
 import { localYear, type LocalHour } from '../schedule/local-year';
+import type { Device, YearResult } from './evaluation-document';
 import { lampSegments, type LampSegment } from './lamp-groups';
 import type { ResolvedScenario } from './resolved-scenario';
 import { YearTotals } from './year-totals';
-import type { YearResult } from './evaluation-document';
-
-export interface RoomYear {
-  roomTempC: Float64Array;
-  roomRelHumidityPct: Float64Array;
-}
-
-export function roomYear({ room, year }: ResolvedScenario): RoomYear {
-  const humidity = hourlyValues(room.relHumidityPct, year);
-  // Joining months by straight lines may overshoot a little past what air can hold.
-  return {
-    roomTempC: hourlyValues(room.airTempC, year),
-    roomRelHumidityPct: humidity.map((pct) => Math.min(100, Math.max(0, pct))),
-  };
-}
 
 interface Segment extends LampSegment {
   /** Tells lamp sets apart, for states that recur. */
@@ -44,39 +39,93 @@ function hourSegments(scenario: ResolvedScenario): Segment[][] {
 
 interface Plant {
   scenario: ResolvedScenario;
+  /** Every how many days one is reckoned, and stands for those left out. */
+  dayStep: number;
   lights: readonly TierLight[];
   tent: TentModel;
-  room: RoomYear;
+  rooms: readonly RoomSide[];
 }
 
-/** Steady states by room, lamps and set-point: a room that stands still asks for each once. */
-function createStates({ scenario, lights, tent, room }: Plant) {
-  const memory = new Map<string, HourState>();
-  const sources = new Map<string, ReturnType<typeof waterSource>>();
-  const { climate, water } = scenario;
-  const steadyW = climate.circulationW + water.pumpW * pumpShare(water);
+/** The room beside the tent in every hour; while it stands still it is the same object. */
+export function roomSides(scenario: ResolvedScenario, { roomTempC, roomRelHumidityPct }: RoomYear): RoomSide[] {
   const slab = scenario.room.slabTempC;
-  return (hour: number, segment: Segment): HourState => {
-    const tempC = room.roomTempC[hour]!;
-    const relHumidityPct = room.roomRelHumidityPct[hour]!;
-    const key = `${tempC} ${relHumidityPct} ${segment.key}`;
-    const known = memory.get(key);
+  const { pressurePa } = tentModel(scenario);
+  const rooms: RoomSide[] = [];
+  let latest: RoomSide | null = null;
+  for (let hour = 0; hour < roomTempC.length; hour += 1) {
+    const tempC = roomTempC[hour]!;
+    const relHumidityPct = roomRelHumidityPct[hour]!;
+    if (latest === null || latest.tempC !== tempC || latest.relHumidityPct !== relHumidityPct) {
+      const slabTempC = slab.kind === 'offset' ? tempC + slab.value : slab.value;
+      latest = roomSide({ tempC, relHumidityPct, slabTempC }, pressurePa);
+    }
+    rooms.push(latest);
+  }
+  return rooms;
+}
+
+/** What one set of lamps keeps from hour to hour: its water and the tent's air at the set-points; and its latest state. */
+interface LampSet {
+  source: WaterSource;
+  setAir: TentAir;
+  maxAir: TentAir;
+  room: RoomSide | null;
+  latest: HourState | null;
+}
+
+/** Steady states by hour and lamps; a room that stands still asks for each once. */
+function createStates({ scenario, lights, tent, rooms }: Plant): (hour: number, segment: Segment) => HourState {
+  const { climate, water } = scenario;
+  const sets = new Map<string, LampSet>();
+  const steadyW = climate.circulationW + water.pumpW * pumpShare(water);
+  const lampSet = (segment: Segment): LampSet => {
+    const known = sets.get(segment.key);
     if (known) return known;
-    const source = sources.get(segment.key) ?? waterSource(scenario, lights, segment.on);
-    sources.set(segment.key, source);
-    const slabTempC = slab.kind === 'offset' ? tempC + slab.value : slab.value;
-    const state = hourState({
-      tent,
-      room: roomSide({ tempC, relHumidityPct, slabTempC }, tent.pressurePa),
+    const source = waterSource(scenario, lights, segment.on);
+    const setTempC = segment.isDay ? climate.dayTempC : climate.nightTempC;
+    const made: LampSet = {
       source,
+      setAir: tentAir(tent, source, setTempC),
+      maxAir: tentAir(tent, source, Math.max(setTempC, climate.maxTempC)),
+      room: null,
+      latest: null,
+    };
+    sets.set(segment.key, made);
+    return made;
+  };
+  return (hour, segment) => {
+    const set = lampSet(segment);
+    const room = rooms[hour]!;
+    if (set.latest && set.room === room) return set.latest;
+    set.room = room;
+    set.latest = hourState({
+      tent,
+      room,
+      source: set.source,
       gainW: segment.lampInsideW + steadyW,
-      setTempC: segment.isDay ? climate.dayTempC : climate.nightTempC,
-      maxTempC: climate.maxTempC,
+      setAir: set.setAir,
+      maxAir: set.maxAir,
       heaterRatedW: climate.heater?.ratedPowerW ?? 0,
       exhaustMaxM3H: climate.exhaust?.maxAirflowM3H ?? 0,
     });
-    memory.set(key, state);
-    return state;
+    return set.latest;
+  };
+}
+
+/** Prices by month, weekday and stretch of the day, each looked up once. */
+function createPrices({ power }: ResolvedScenario): (hour: LocalHour, segment: Segment) => number {
+  const { tariff } = power;
+  if (tariff.kind === 'flat') return () => tariff.pricePerKwh;
+  if (tariff.kind === 'tiered') return () => 0;
+  const known = new Map<number, number>();
+  return ({ month, weekday }, { fromMin, toMin }) => {
+    const key = (month * 7 + weekday) * 2 * DAY_MIN + fromMin;
+    let price = known.get(key);
+    if (price === undefined) {
+      price = priceAt(tariff, { month, weekday, minute: (fromMin + toMin) / 2 });
+      known.set(key, price);
+    }
+    return price;
   };
 }
 
@@ -88,43 +137,56 @@ function fanShare(scenario: ResolvedScenario, tent: TentModel, airflowM3H: numbe
   return Math.min(1, flow / fan.maxAirflowM3H);
 }
 
-/** Highest five-minute mean of the pump. */
-function pumpPeakW({ water }: ResolvedScenario): number {
-  return water.pumpW * Math.min(1, water.flood.minutes / 5);
+/** Highest five-minute mean of the pump: as many whole floods as fit five minutes, and what begins of the next. */
+export function pumpPeakW({ pumpW, flood }: ResolvedScenario['water']): number {
+  const whole = Math.floor(5 / flood.everyMinutes);
+  const onMin = whole * flood.minutes + Math.min(flood.minutes, 5 - whole * flood.everyMinutes);
+  return (pumpW * Math.min(5, onMin)) / 5;
 }
 
-function addHour(
-  totals: YearTotals,
+type Watts = Record<Device, number>;
+
+/** Every stretch of the year in turn, with its steady state and its power by device; the record of powers is used again. */
+function walkYear(
   plant: Plant,
-  hour: LocalHour,
-  segments: readonly Segment[],
-  stateOf: ReturnType<typeof createStates>,
+  visit: (hour: LocalHour, segment: Segment, reckoned: HourState, powerW: Watts) => void,
 ): void {
-  const { scenario, tent } = plant;
-  const { climate, water, power } = scenario;
-  for (const segment of segments) {
-    const { state, heaterW, unmetK, overK } = stateOf(hour.index, segment);
-    const exhaustW = (climate.exhaust?.inputPowerW ?? 0) * fanShare(scenario, tent, state.airflowM3H);
-    totals.add(hour.month, segment.shareOfHour, {
-      price: priceAt(power.tariff, {
-        month: hour.month,
-        weekday: hour.weekday,
-        minute: (segment.fromMin + segment.toMin) / 2,
-      }),
-      powerW: {
-        light: segment.lampW,
-        heater: heaterW,
-        exhaust: exhaustW,
-        circulation: climate.circulationW,
-        pump: water.pumpW * pumpShare(water),
-      },
-      peakW: segment.lampW + heaterW + exhaustW + climate.circulationW + pumpPeakW(scenario),
-      state,
-      unmetK,
-      overK,
-      sweats: dewMargin(scenario, state, plant.room.roomTempC[hour.index]!) < 0,
-    });
+  const { scenario, tent, dayStep } = plant;
+  const { climate, water } = scenario;
+  const segments = hourSegments(scenario);
+  const stateOf = createStates(plant);
+  const fanW = climate.exhaust?.inputPowerW ?? 0;
+  const pumpW = water.pumpW * pumpShare(water);
+  const powerW: Watts = { light: 0, heater: 0, exhaust: 0, circulation: climate.circulationW, pump: pumpW };
+  for (const hour of localYear(scenario.place.timeZone, scenario.year)) {
+    if (dayStep > 1 && Math.floor(hour.index / 24) % dayStep !== 0) continue;
+    for (const segment of segments[hour.wallHour]!) {
+      const reckoned = stateOf(hour.index, segment);
+      powerW.light = segment.lampW;
+      powerW.heater = reckoned.heaterW;
+      powerW.exhaust = fanW * fanShare(scenario, tent, reckoned.state.airflowM3H);
+      visit(hour, segment, reckoned, powerW);
+    }
   }
+}
+
+interface YearOf {
+  scenario: ResolvedScenario;
+  lights: readonly TierLight[];
+  /** From `roomSides`. */
+  rooms: readonly RoomSide[];
+  dayStep?: number;
+}
+
+const plantOf = ({ dayStep = 1, ...year }: YearOf): Plant => ({ ...year, dayStep, tent: tentModel(year.scenario) });
+
+/** All that the tent takes in a year, kWh. */
+export function yearEnergyKwh(year: YearOf): number {
+  let sumWh = 0;
+  walkYear(plantOf(year), (_hour, { shareOfHour }, _reckoned, powerW) => {
+    sumWh += (powerW.light + powerW.heater + powerW.exhaust + powerW.circulation + powerW.pump) * shareOfHour;
+  });
+  return sumWh / 1000;
 }
 
 /**
@@ -134,12 +196,20 @@ function addHour(
  *
  * @returns sums and means by month; `netLightEnergyKwh` and `heaterCyclesPerH` are filled in by the caller
  */
-export function simulateYear(scenario: ResolvedScenario, lights: readonly TierLight[], room: RoomYear): YearResult {
-  const plant: Plant = { scenario, lights, tent: tentModel(scenario), room };
-  const segments = hourSegments(scenario);
-  const stateOf = createStates(plant);
+export function simulateYear(year: YearOf): YearResult {
+  const { scenario, rooms, dayStep = 1 } = year;
+  const { climate, water } = scenario;
+  const priceOf = createPrices(scenario);
   const totals = new YearTotals(scenario.year, scenario.power);
-  for (const hour of localYear(scenario.place.timeZone, scenario.year))
-    addHour(totals, plant, hour, segments[hour.wallHour]!, stateOf);
+  const besidesW = climate.circulationW + pumpPeakW(water);
+  let latest: TentState | null = null;
+  let sweats = false;
+  walkYear(plantOf(year), (hour, segment, { state, unmetK, overK }, powerW) => {
+    if (state !== latest) sweats = wallSweats(scenario, state, rooms[hour.index]!.tempC);
+    latest = state;
+    const peakW = powerW.light + powerW.heater + powerW.exhaust + besidesW;
+    const price = priceOf(hour, segment);
+    totals.add(hour.month, segment.shareOfHour * dayStep, { price, powerW, peakW, state, unmetK, overK, sweats });
+  });
   return totals.result();
 }

@@ -8,7 +8,8 @@ import {
   uValue,
 } from '@/physics/heat/envelope';
 import { HEATER_SIZES_W, sizeUp } from '@/physics/heat/recommended-size';
-import { roomSide, temperatureFor, tentState, type TentModel, type WaterSource } from '@/physics/heat/tent-state';
+import { temperatureFor } from '@/physics/heat/settled-state';
+import { roomSide, tentState, type TentModel, type WaterSource } from '@/physics/heat/tent-state';
 import { heaterCycles } from '@/physics/heat/thermostat';
 import { canopyLatentHeat, stomatalResistance } from '@/physics/moisture/transpiration';
 import { waterEvaporationLine } from '@/physics/moisture/open-water';
