@@ -1,6 +1,7 @@
 import 'server-only';
 
 import { randomUUID } from 'node:crypto';
+import { isDeepStrictEqual } from 'node:util';
 import { sql } from 'kysely';
 import { audit } from '../audit/audit';
 import { requireAllowed } from '../auth/require-allowed';
@@ -80,7 +81,9 @@ export async function updateRoom(
   return inGarden(actor.gardenId, async (trx) => {
     const before = await roomById(trx, actor.gardenId, roomId, 'change');
     if (before.version !== version) throw clash(before);
-    if (change.power) await requireCurrency(trx, actor.gardenId, change.power);
+    // Prices from before the garden changed its currency stay until somebody types new ones.
+    if (change.power && !isDeepStrictEqual(change.power.tariff, before.power.tariff))
+      await requireCurrency(trx, actor.gardenId, change.power);
     if (change.climate) await requireTentsFit(trx, actor.gardenId, { ...before, climate: change.climate });
     await trx
       .updateTable('rooms')

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { closePools } from '@/lib/db/client';
+import { updateGarden } from '@/lib/gardens/garden.service';
 import { createRoom, deleteRoom, getRoom, listRooms, updateRoom } from '@/lib/rooms/room.service';
 import { createTent, deleteTent, listTents, updateTent } from '@/lib/tents/tent.service';
 import { updateScenario, listScenarios } from '@/lib/scenarios/scenario.service';
@@ -128,6 +129,19 @@ describe('rooms', () => {
     const room = await createRoom(garden.owner, roomInput);
     await expect(updateRoom(garden.owner, room.roomId, { version: 1, power })).rejects.toMatchObject({ status: 422 });
     expect(await getRoom(garden.owner, room.roomId)).toEqual(room);
+  });
+
+  it('keep prices from before the garden changed its currency until new ones are typed', async () => {
+    const moved = await newGarden('Moved');
+    const room = await createRoom(moved.owner, roomInput);
+    await updateGarden(moved.owner, { version: 1, currency: 'USD' });
+    const circuits = [{ id: 'c1', name: 'Renamed', ratingA: 10 }];
+    const kept = await updateRoom(moved.owner, room.roomId, { version: 1, power: { ...room.power, circuits } });
+    expect(kept.power).toEqual({ ...room.power, circuits });
+    const tariff = { kind: 'flat' as const, currency: 'EUR', pricePerKwh: 0.31 };
+    await expect(
+      updateRoom(moved.owner, room.roomId, { version: 2, power: { ...kept.power, tariff } }),
+    ).rejects.toMatchObject({ status: 422, problems: [{ path: 'power.tariff.currency', range: 'USD' }] });
   });
 
   it('refuse hours of another year than their scenarios reckon, and name the scenario', async () => {

@@ -44,7 +44,8 @@ function asKind(kind: Tariff['kind'], from: Tariff | null, currency: string, pri
 export function TariffPart({ room, change, readOnly, currency, reference }: TariffPartProps) {
   const { power } = room;
   const tariff = power.tariff;
-  const put = (next: Tariff | null) => change({ power: { ...power, tariff: next } });
+  // What is typed under the garden's currency is in the garden's currency, whatever the room reckoned in before.
+  const put = (next: Tariff | null) => change({ power: { ...power, tariff: next && { ...next, currency } } });
   const price =
     tariff?.kind === 'flat'
       ? tariff.pricePerKwh
