@@ -9,19 +9,27 @@ function fail(lines: string[]): never {
   process.exit(2);
 }
 
-function readDocument(file: string): unknown {
-  let text: string;
+const tooLarge = (bytes: number): never =>
+  fail([`$: the file is ${bytes} bytes; at most ${LARGEST_BYTES} bytes are read`]);
+
+function readText(file: string): string {
+  let bytes: Buffer;
   try {
-    if (statSync(file).size > LARGEST_BYTES)
-      fail([`$: the file is ${statSync(file).size} bytes; at most ${LARGEST_BYTES} bytes are read`]);
-    text = readFileSync(file, 'utf8');
+    if (statSync(file).size > LARGEST_BYTES) return tooLarge(statSync(file).size);
+    bytes = readFileSync(file);
   } catch {
-    fail([`$: the file ${file} cannot be read; give the path of a JSON document`]);
+    return fail([`$: the file ${file} cannot be read; give the path of a JSON document`]);
   }
+  // A pipe has no size before it is read.
+  return bytes.byteLength > LARGEST_BYTES ? tooLarge(bytes.byteLength) : bytes.toString('utf8');
+}
+
+function readDocument(file: string): unknown {
+  const text = readText(file);
   try {
     return JSON.parse(text);
   } catch {
-    fail(['$: this is not JSON; check for a missing bracket, quote or comma']);
+    return fail(['$: this is not JSON; check for a missing bracket, quote or comma']);
   }
 }
 

@@ -25,7 +25,11 @@ export interface EvaluateOptions {
    */
   dayStep?: number;
   lightCache?: LightCache | undefined;
+  /** Milliseconds, for `elapsedMs`: physics has no clock of its own. */
+  clock?: () => number;
 }
+
+const noClock = () => 0;
 
 /** What is placed and not had already, in minor units. */
 function upFrontMinor(scenario: ResolvedScenario): number {
@@ -164,25 +168,25 @@ function warningsOf(scenario: ResolvedScenario, heat: HeatResult, year: YearResu
  * Everything that the physics says of a scenario.
  *
  * @param document scenario/1, checked
- * @returns evaluation/1; `elapsedMs` is 0, the caller has the clock
+ * @returns evaluation/1; `elapsedMs` is 0 unless a clock is given
  * @throws DomainError for what is physically impossible
  * @accuracy see the parts: light/evaluate-light-scene.ts, heat/tent-state.ts, plan/year.ts
  */
 export function evaluateScenario(
   document: ScenarioDocument,
-  { year: withYear = true, dayStep = 1, lightCache }: EvaluateOptions = {},
+  { year: withYear = true, dayStep = 1, lightCache, clock = noClock }: EvaluateOptions = {},
 ): Evaluation {
   const { scenario, assumptions } = resolveScenario(document);
+  const startMs = clock();
   const lights = solveTierLight(scenario, lightCache);
+  const lightMs = clock() - startMs;
   const room = roomYear(scenario);
   const withoutHeater = circuitResults(scenario, { without: 'heater' });
   const { heat, slipTempC } = designStates({ scenario, lights, year: room, withoutHeater });
-  const facts = {
-    tiers: tierResults(scenario, lights),
-    heat,
-    year: withYear ? wholeYear(scenario, lights, room, heat, dayStep) : emptyYear(),
-    circuits: circuitResults(scenario),
-  };
+  const yearStartMs = clock();
+  const year = withYear ? wholeYear(scenario, lights, room, heat, dayStep) : emptyYear();
+  const yearMs = clock() - yearStartMs;
+  const facts = { tiers: tierResults(scenario, lights), heat, year, circuits: circuitResults(scenario) };
   return {
     schema: 'evaluation/1',
     physicsVersion,
@@ -190,7 +194,7 @@ export function evaluateScenario(
     upFront: { costMinor: upFrontMinor(scenario) },
     cautions: cautionsFor({ scenario, slipTempC, ...facts }),
     assumptions: [...assumptions, ...designAssumptions(scenario, room)],
-    warnings: warningsOf(scenario, facts.heat, facts.year, withYear),
-    elapsedMs: { light: 0, year: 0 },
+    warnings: warningsOf(scenario, heat, year, withYear),
+    elapsedMs: { light: lightMs, year: yearMs },
   };
 }
