@@ -48,7 +48,11 @@ function innermost(issue: Issue): Issue[] {
   if (issue.code !== 'invalid_union' || !issue.errors || issue.errors.length === 0) return [issue];
   const depth = (branch: Issue[]) => Math.max(0, ...branch.map((each) => each.path.length));
   const best = [...issue.errors].sort((a, b) => depth(b) - depth(a))[0]!;
-  if (depth(best) === 0) return [issue];
+  if (depth(best) === 0) {
+    const told = issue.errors.flat().find((each) => expectationOf(each.message));
+    // A union with words of its own knows better than any branch.
+    return told && issue.message.startsWith('Invalid input') ? [{ ...told, path: issue.path } as Issue] : [issue];
+  }
   return best.flatMap((each) => innermost({ ...each, path: [...issue.path, ...each.path] } as Issue));
 }
 
