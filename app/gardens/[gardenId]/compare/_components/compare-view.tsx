@@ -45,7 +45,7 @@ export function CompareView({ garden, choices, comparison }: CompareViewProps) {
         <CompareTable columns={columns} base={base} gardenId={garden.gardenId} />
       </div>
       <CostAgainstLight columns={columns} />
-      <section className="grid gap-8 border-t border-line pt-6 mt-10 md:grid-cols-2">
+      <section className="grid grid-cols-1 gap-8 border-t border-line pt-6 mt-10 md:grid-cols-2">
         <div>
           <h2 className="pb-2 text-17">Which to compare</h2>
           {choices.map((tent) => (

@@ -22,7 +22,7 @@ export function AirTemperature({ room, change, readOnly }: RoomPartProps) {
   const put = (airTempC: Series) => change({ climate: { ...room.climate, airTempC } });
   const swing = series.kind === 'monthly' ? series.dailySwingK : undefined;
   return (
-    <section className="grid gap-x-6 gap-y-4 pt-10 lg:grid-cols-[196px_minmax(0,1fr)] xl:grid-cols-[196px_minmax(0,1fr)_160px]">
+    <section className="grid grid-cols-1 gap-x-6 gap-y-4 pt-10 lg:grid-cols-[196px_minmax(0,1fr)] xl:grid-cols-[196px_minmax(0,1fr)_160px]">
       <div>
         <h2 className="text-14 font-semibold">Air temperature</h2>
         <p className="pb-2 text-12 text-ink-soft">

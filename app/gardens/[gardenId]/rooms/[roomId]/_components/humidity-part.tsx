@@ -10,7 +10,7 @@ export function HumidityPart({ room, change, readOnly }: RoomPartProps) {
   const usual = defaults['room.relHumidityPct'];
   const put = (value: number) => change({ climate: { ...room.climate, relHumidityPct: { kind: 'constant', value } } });
   return (
-    <section className="grid gap-x-6 gap-y-4 border-t border-line pt-6 mt-8 lg:grid-cols-[196px_minmax(0,1fr)]">
+    <section className="grid grid-cols-1 gap-x-6 gap-y-4 border-t border-line pt-6 mt-8 lg:grid-cols-[196px_minmax(0,1fr)]">
       <h2 className="text-14 font-semibold">Humidity</h2>
       <QuantityField
         label="All year"

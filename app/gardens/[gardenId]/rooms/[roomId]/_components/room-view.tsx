@@ -86,7 +86,7 @@ export function RoomView({ garden, room: initial, readOnly, reference }: RoomVie
       <RowTrouble saved={saved} />
       <AirTemperature {...parts} />
       <HumidityPart {...parts} />
-      <div className="grid gap-x-16 gap-y-10 border-t border-line pt-8 mt-8 lg:grid-cols-[340px_minmax(0,1fr)]">
+      <div className="grid grid-cols-1 gap-x-16 gap-y-10 border-t border-line pt-8 mt-8 lg:grid-cols-[340px_minmax(0,1fr)]">
         <PlacePart {...parts} />
         <CircuitsPart {...parts} />
       </div>

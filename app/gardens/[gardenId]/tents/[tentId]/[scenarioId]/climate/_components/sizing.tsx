@@ -16,7 +16,7 @@ export function Sizing({ document, evaluation }: SizingProps) {
   const about = (...parts: string[]) =>
     cautions.filter((caution) => parts.some((part) => caution.code.startsWith(part)));
   return (
-    <section className="grid gap-x-16 gap-y-10 border-t border-line pt-8 md:grid-cols-2">
+    <section className="grid grid-cols-1 gap-x-16 gap-y-10 border-t border-line pt-8 md:grid-cols-2">
       <div>
         <h2 className="text-22">A heater for this</h2>
         <p className="pt-2 text-17">

@@ -73,7 +73,7 @@ export function PowerView({ workbench, document, evaluation }: PowerViewProps) {
         <Explainable path="year.cost">How the year is reckoned</Explainable>. CO₂: {figureText(year.co2Kg, 0)} kg a
         year. Highest draw: {figureText(year.peakPowerW, 0)} W.
       </p>
-      <div className="grid gap-x-28 gap-y-10 border-t border-line pt-2 mt-10 lg:grid-cols-[minmax(0,636fr)_minmax(0,540fr)]">
+      <div className="grid grid-cols-1 gap-x-28 gap-y-10 border-t border-line pt-2 mt-10 lg:grid-cols-[minmax(0,636fr)_minmax(0,540fr)]">
         <div>
           <h2 className="pt-6 text-22">Circuits</h2>
           {evaluation.circuits.length === 0 && (
