@@ -71,7 +71,7 @@ interface OptionProps<V extends string> {
 function Option<V extends string>({ name, option, row, checked, disabled, onChoose }: OptionProps<V>) {
   const rule = row
     ? `border-b-[2.5px] ${checked ? 'border-b-lamp' : 'border-b-transparent'}`
-    : `-ml-3 border-l-[3px] pl-2.25 ${checked ? 'border-l-lamp' : 'border-l-transparent'}`;
+    : `-ml-3 border-l-[3px] py-1 pl-2.25 ${checked ? 'border-l-lamp' : 'border-l-transparent'}`;
   const tone = disabled ? 'text-ink-soft' : checked ? 'text-ink' : 'text-ink-soft hover:text-ink';
   return (
     <label

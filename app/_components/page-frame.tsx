@@ -58,7 +58,7 @@ export function PageFrame(props: PageFrameProps) {
         <Trail trail={trail} />
         <div className="text-right text-14">
           {right ?? (
-            <TextLink href="/account" look="quiet">
+            <TextLink href="/account" look="quiet" className="inline-flex min-h-6 touch-44 items-center">
               Account
             </TextLink>
           )}
@@ -78,26 +78,25 @@ export function PageFrame(props: PageFrameProps) {
 }
 
 function Trail({ trail }: { trail: readonly Crumb[] }) {
-  if (trail.length === 0) return <p className="text-14 font-semibold">Your gardens</p>;
+  if (trail.length === 0) return <p className="inline-flex min-h-6 items-center text-14 font-semibold">Your gardens</p>;
   return (
     <nav aria-label="Where you are" className="min-w-0 text-14">
-      {trail.map((crumb, at) => {
-        const last = at === trail.length - 1;
-        return (
-          <span key={at}>
-            {crumb.href && !last ? (
-              <TextLink href={crumb.href} look="quiet">
-                {crumb.words}
-              </TextLink>
-            ) : (
-              <span aria-current={last ? 'page' : undefined} className={last ? 'font-semibold' : 'text-ink-soft'}>
-                {crumb.words}
-              </span>
-            )}
-            {!last && <span className="text-ink-soft">, </span>}
-          </span>
-        );
-      })}
+      <ol>
+        {trail.map((crumb, at) => {
+          const last = at === trail.length - 1;
+          return (
+            <li key={at} className={`inline ${last ? 'font-semibold' : "text-ink-soft after:content-[',_']"}`}>
+              {crumb.href && !last ? (
+                <TextLink href={crumb.href} look="plain" className="py-1 hover:text-ink">
+                  {crumb.words}
+                </TextLink>
+              ) : (
+                <span aria-current={last ? 'page' : undefined}>{crumb.words}</span>
+              )}
+            </li>
+          );
+        })}
+      </ol>
     </nav>
   );
 }

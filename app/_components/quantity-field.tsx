@@ -57,7 +57,7 @@ export function QuantityField(props: QuantityFieldProps) {
             className={fieldBox({ error: typed.problem !== null, isDefault: !!isDefault, disabled: !!disabled })}
             onClick={() => own.current?.focus()}
           >
-            <span className="inline-grid max-w-full min-w-0">
+            <span className="inline-grid max-w-full min-w-0 items-center self-stretch">
               <span aria-hidden="true" className="invisible col-start-1 row-start-1 min-w-2 whitespace-pre">
                 {typed.text}
               </span>
@@ -72,7 +72,7 @@ export function QuantityField(props: QuantityFieldProps) {
                 inputMode="text"
                 autoComplete="off"
                 spellCheck={false}
-                className="col-start-1 row-start-1 w-0 min-w-full bg-transparent outline-none"
+                className="col-start-1 row-start-1 w-0 min-w-full self-stretch bg-transparent outline-none"
                 value={typed.text}
                 disabled={disabled}
                 aria-invalid={typed.problem !== null || undefined}
@@ -98,7 +98,12 @@ export function QuantityField(props: QuantityFieldProps) {
             <p id={reasonId} className="pt-1 text-12 text-ink-soft">
               {defaultReason}{' '}
               {onConfirmDefault && (
-                <button type="button" className="link-does touch-44" onClick={onConfirmDefault} disabled={disabled}>
+                <button
+                  type="button"
+                  className="inline-flex min-h-6 touch-44 items-center link-does"
+                  onClick={onConfirmDefault}
+                  disabled={disabled}
+                >
                   Confirm {typed.standing}
                 </button>
               )}

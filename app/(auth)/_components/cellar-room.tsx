@@ -26,7 +26,9 @@ export function CellarRoom({ children, drawing, below }: CellarRoomProps) {
           <main id="main" tabIndex={-1} className="w-full max-w-107.5 shrink-0 pt-17 pb-12 outline-none max-md:pt-8">
             {children}
           </main>
-          <div className="flex grow items-end justify-center pl-12 max-lg:hidden">{drawing}</div>
+          <aside aria-label="A drawing" className="flex grow items-end justify-center pl-12 max-lg:hidden">
+            {drawing}
+          </aside>
         </div>
         <div aria-hidden="true" className="hatch-cut max-md:hidden" />
       </div>

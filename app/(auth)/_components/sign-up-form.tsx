@@ -27,7 +27,8 @@ export function SignUpForm() {
   const { control, handleSubmit, setError, formState, setFocus } = form;
 
   useEffect(() => {
-    setFocus('displayName');
+    // On a phone it would raise the keyboard over the page.
+    if (matchMedia('(pointer: fine)').matches) setFocus('displayName');
   }, [setFocus]);
 
   const send = async (input: SignUp) => {

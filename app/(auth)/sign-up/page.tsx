@@ -27,7 +27,7 @@ export default async function SignUpPage() {
       <p className="pt-8 text-12 text-ink-soft">
         The address is only for signing in: nothing is sent to it, so a forgotten passphrase cannot be reset by mail.
         Keep it where you keep keys.{' '}
-        <TextLink href="/stored" look="opens">
+        <TextLink href="/stored" look="opens" className="inline-flex min-h-6 touch-44 items-center">
           What is stored
         </TextLink>
       </p>

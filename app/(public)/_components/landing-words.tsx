@@ -39,7 +39,7 @@ export function LandingWords({ doc, crops, onChange }: LandingWordsProps) {
   return (
     <div className="flex h-full flex-col justify-between gap-6 pt-60 max-[1179px]:pt-1 max-[1179px]:pb-4">
       <div>
-        <div className="grid max-w-110 grid-cols-2 gap-x-5 gap-y-4 max-md:grid-cols-1">
+        <div className="grid max-w-110 grid-cols-2 gap-x-5 gap-y-4 min-[1180px]:max-[1399px]:grid-cols-1 max-md:grid-cols-1">
           {downward.map((tier) => (
             <SelectField
               key={tier.id}

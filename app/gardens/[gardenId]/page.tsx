@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { Suspense } from 'react';
+import { Suspense, type CSSProperties } from 'react';
 import { DashedTent } from '@/app/gardens/_components/dashed-tent';
 import { Remedy } from '@/app/gardens/_components/remedy';
 import { RoomCut } from '@/app/gardens/_components/room-cut';
@@ -31,6 +31,7 @@ export default async function GardenPage({ params }: GardenPageProps) {
   const { garden, rooms, month } = shown;
   const tents = rooms.flatMap((room) => room.tents);
   const worst = [...tents].sort((a, b) => b.words.urgency - a.words.urgency)[0];
+  const tallPx = roomHeightPx(tents.map((tent) => tent.overview));
   const mayRoom = can(garden.role, 'room.create');
   const mayTent = can(garden.role, 'tent.create');
   const headline =
@@ -62,35 +63,39 @@ export default async function GardenPage({ params }: GardenPageProps) {
       <div className="flex flex-wrap gap-y-5 pt-8 pl-2.25 [--m:84px] max-lg:flex-col max-lg:pl-0 max-md:[--m:66px]">
         {rooms.map((room) => (
           <RoomCut
+            level={2}
             key={room.room.roomId}
             gardenId={gardenId}
             shown={room}
-            heightPx={roomHeightPx(tents.map((tent) => tent.overview))}
+            heightPx={tallPx}
             mayAdd={mayTent}
           />
         ))}
-      </div>
-      {(mayTent || mayRoom) && (
-        <div className="pt-8">
-          <DashedTent>
-            {rooms.length > 0 ? (
-              <>
-                <TextLink href={`/gardens/${gardenId}/tents/new`} look="button">
-                  Add a tent
+        {(mayTent || mayRoom) && (
+          <div
+            className={`flex grow items-end max-lg:justify-start max-lg:pl-0 lg:h-(--tall) ${rooms.length > 0 ? 'justify-end pl-16' : ''}`}
+            style={{ '--tall': `${tallPx + 9}px` } as CSSProperties}
+          >
+            <DashedTent>
+              {rooms.length > 0 ? (
+                <>
+                  <TextLink href={`/gardens/${gardenId}/tents/new`} look="button">
+                    Add a tent
+                  </TextLink>
+                  <p className="pt-2 text-12 text-ink-soft">
+                    It asks where, how large and how many tiers.{' '}
+                    <TextLink href={`/gardens/${gardenId}/rooms/new`}>Add a room</TextLink>
+                  </p>
+                </>
+              ) : (
+                <TextLink href={`/gardens/${gardenId}/rooms/new`} look="button">
+                  Add a room
                 </TextLink>
-                <p className="pt-2 text-12 text-ink-soft">
-                  It asks where, how large and how many tiers.{' '}
-                  <TextLink href={`/gardens/${gardenId}/rooms/new`}>Add a room</TextLink>
-                </p>
-              </>
-            ) : (
-              <TextLink href={`/gardens/${gardenId}/rooms/new`} look="button">
-                Add a room
-              </TextLink>
-            )}
-          </DashedTent>
-        </div>
-      )}
+              )}
+            </DashedTent>
+          </div>
+        )}
+      </div>
       <p className="mt-8 border-t border-line pt-4 text-12 text-ink-soft">
         {month && (
           <>

@@ -14,7 +14,7 @@ export function DashedTent({
     <div className="flex max-w-full flex-wrap items-end gap-x-9 border-b border-dashed border-ink-soft max-md:flex-nowrap max-md:gap-x-5">
       <svg
         viewBox={`0 0 ${wide + 40} ${tall}`}
-        className="block shrink-0 max-md:w-24"
+        className="block shrink-0 max-md:h-auto max-md:w-24"
         width={wide + 40}
         height={tall}
         fill="none"

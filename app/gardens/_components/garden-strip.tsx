@@ -58,7 +58,14 @@ export function GardenStrip({ shown, heightPx, adder }: GardenStripProps) {
       </div>
       <div className="flex min-w-0 flex-wrap gap-y-4 pl-2.25 max-lg:flex-col max-lg:pl-0">
         {rooms.map((room) => (
-          <RoomCut key={room.room.roomId} gardenId={garden.gardenId} shown={room} heightPx={heightPx} mayAdd={mayAdd} />
+          <RoomCut
+            level={3}
+            key={room.room.roomId}
+            gardenId={garden.gardenId}
+            shown={room}
+            heightPx={heightPx}
+            mayAdd={mayAdd}
+          />
         ))}
         {rooms.length === 0 && (
           <p className="py-2 text-14 text-ink-soft">
@@ -73,7 +80,7 @@ export function GardenStrip({ shown, heightPx, adder }: GardenStripProps) {
         {adder && (
           <div
             className="flex grow items-end justify-end pl-16 max-lg:justify-start max-lg:pl-0 lg:h-(--tall)"
-            style={{ '--tall': `${heightPx + 22}px` } as CSSProperties}
+            style={{ '--tall': `${heightPx + 9}px` } as CSSProperties}
           >
             {adder}
           </div>

@@ -12,11 +12,14 @@ interface RoomCutProps {
   heightPx: number;
   /** Under a room without a tent. */
   mayAdd: boolean;
+  /** Under a garden's name a room is one level deeper than on the garden's own page. */
+  level: 2 | 3;
 }
 
 /** A room cut open: slabs and walls hatched, its tents on the floor, each tent's sentence below the slab. */
-export function RoomCut({ gardenId, shown, heightPx, mayAdd }: RoomCutProps) {
+export function RoomCut({ gardenId, shown, heightPx, mayAdd, level }: RoomCutProps) {
   const { room, tents } = shown;
+  const Heading = `h${level}` as const;
   const columns = Math.max(1, tents.length);
   return (
     <section
@@ -24,21 +27,25 @@ export function RoomCut({ gardenId, shown, heightPx, mayAdd }: RoomCutProps) {
       className="-ml-2.25 grid min-w-0 max-w-full grid-cols-1 content-start max-lg:ml-0 lg:[grid-template-columns:var(--columns)]"
       style={{ '--columns': `repeat(${columns}, minmax(0, auto))`, '--tall': `${heightPx}px` } as CSSProperties}
     >
-      <div className="hatch-cut p-2.25 lg:row-start-1 lg:[grid-column:1/-1]" style={{ gridColumnEnd: columns + 1 }}>
+      <div className="hatch-cut pt-2.25 lg:row-start-1 lg:min-w-96 lg:px-2.25 lg:pb-2.25 lg:[grid-column:1/-1]">
         <div className="border-t-[1.5px] border-ink bg-paper lg:h-(--tall) lg:border-[1.5px]">
-          <h3 id={`room-${room.roomId}`} className="px-7.5 pt-1.5 text-12 max-lg:px-3 max-lg:pb-1.5 lg:text-right">
-            <TextLink href={`/gardens/${gardenId}/rooms/${room.roomId}`} look="opens" className="font-semibold">
+          <Heading id={`room-${room.roomId}`} className="px-7.5 pt-1.5 text-12 max-lg:px-3 max-lg:pb-1.5 lg:text-right">
+            <TextLink
+              href={`/gardens/${gardenId}/rooms/${room.roomId}`}
+              look="opens"
+              className="inline-flex min-h-6 touch-44 items-center font-semibold"
+            >
               {room.name}
             </TextLink>
             <span className="pl-2 font-normal text-ink-soft lg:block lg:pl-0">
               <Figure value={shown.airTempC} kind="temperature" /> and {shown.relHumidityPct.toFixed(0)} % in{' '}
               {shown.monthName}
             </span>
-          </h3>
+          </Heading>
         </div>
       </div>
       {tents.map((tent, at) => (
-        <TentColumn key={tent.overview.tent.tentId} {...{ gardenId, tent, at, heightPx }} />
+        <TentColumn key={tent.overview.tent.tentId} {...{ gardenId, tent, at, heightPx, level }} />
       ))}
       {tents.length === 0 && (
         <p className="pt-3 pl-9.75 text-14 text-ink-soft max-lg:pl-3">
@@ -50,17 +57,13 @@ export function RoomCut({ gardenId, shown, heightPx, mayAdd }: RoomCutProps) {
   );
 }
 
-function TentColumn({
-  gardenId,
-  tent,
-  at,
-  heightPx,
-}: {
-  gardenId: string;
+interface TentColumnProps extends Pick<RoomCutProps, 'gardenId' | 'heightPx' | 'level'> {
   tent: TentShown;
   at: number;
-  heightPx: number;
-}) {
+}
+
+function TentColumn({ gardenId, tent, at, heightPx, level }: TentColumnProps) {
+  const Heading = `h${level === 2 ? 3 : 4}` as const;
   const { overview, words } = tent;
   const { tent: row, document: doc } = overview;
   const base = `/gardens/${gardenId}/tents/${row.tentId}/${row.currentScenarioId ?? ''}`;
@@ -78,14 +81,14 @@ function TentColumn({
         className="relative pt-2 pr-6 pb-5 pl-9.75 text-14 lg:row-start-2 lg:min-w-56 lg:[grid-column:var(--at)]"
         style={column}
       >
-        <h4>
-          <TextLink href={base} look="opens" strong className="text-ink">
+        <Heading>
+          <TextLink href={base} look="opens" strong className="inline-flex min-h-6 touch-44 items-center">
             {row.name}
           </TextLink>{' '}
-          <span className="text-ink-soft">
+          <span className="font-normal text-ink-soft max-md:block">
             {countWords(doc.tiers.length, 'tier', 'tiers')}, {countWords(doc.placements.length, 'lamp', 'lamps')}
           </span>
-        </h4>
+        </Heading>
         <p className="max-w-[24rem]">
           <span className="absolute left-0.5">
             <VerdictMark verdict={words.mark.verdict} tone={words.mark.tone} />

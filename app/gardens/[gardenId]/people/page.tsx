@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { countWords } from '@/app/gardens/_components/tent-words';
 import { PageFrame } from '@/app/_components/page-frame';
 import { can } from '@/lib/auth/permissions';
 import { getGarden } from '@/lib/gardens/garden.service';
@@ -11,7 +12,10 @@ import { RoleTable } from './_components/role-table';
 
 export const metadata: Metadata = { title: 'People' };
 
-const headline = (count: number) => (count === 1 ? 'You grow here alone.' : `${count} people grow here.`);
+const headline = (count: number) => {
+  const words = countWords(count, 'person', 'people');
+  return count === 1 ? 'You grow here alone.' : `${words[0]!.toUpperCase()}${words.slice(1)} grow here.`;
+};
 
 export default async function PeoplePage({ params }: { params: Promise<{ gardenId: string }> }) {
   const { gardenId } = await params;

@@ -42,7 +42,7 @@ function MemberRow({ gardenId, member, mayChange }: { gardenId: string; member: 
     await update.mutateAsync({ accountId: member.accountId, role }).catch((error) => setProblem(wordsOf(error)));
   };
   return (
-    <li className="grid grid-cols-[minmax(0,1fr)_214px_minmax(0,1fr)_auto] items-center gap-x-6 gap-y-2 border-b border-line py-3 max-md:grid-cols-1">
+    <li className="grid grid-cols-[minmax(0,18rem)_214px_minmax(0,1fr)_13rem] items-center gap-x-6 gap-y-2 border-b border-line py-3 max-md:grid-cols-1">
       <div className="min-w-0">
         <p className="text-14 font-semibold">
           {member.displayName}
@@ -95,7 +95,7 @@ function Leaving({ gardenId, member, mayChange, onProblem }: LeavingProps) {
   };
   const verb = 'min-h-6 touch-44 cursor-pointer text-12 underline underline-offset-4';
   return asked ? (
-    <span className="flex gap-4">
+    <span className="flex gap-4 md:justify-end">
       <button type="button" className={`${verb} text-ember-ink`} onClick={() => void go()} disabled={remove.isPending}>
         {member.you ? 'Leave now' : `Remove ${member.displayName}`}
       </button>
@@ -106,7 +106,7 @@ function Leaving({ gardenId, member, mayChange, onProblem }: LeavingProps) {
   ) : (
     <button
       type="button"
-      className={`${verb} text-left text-ink-soft`}
+      className={`${verb} justify-self-start text-ink-soft md:justify-self-end`}
       aria-label={member.you ? 'Leave this garden' : `Remove ${member.displayName}`}
       onClick={() => setAsked(true)}
     >

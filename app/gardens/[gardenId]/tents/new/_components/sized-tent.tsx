@@ -1,5 +1,6 @@
 'use client';
 
+import type { CSSProperties } from 'react';
 import { QuantityField } from '@/app/_components/quantity-field';
 import { starterPlan } from '@/lib/scenarios/starter-plan';
 
@@ -18,6 +19,7 @@ interface SizedTentProps {
 const BOX = { width: 340, height: 420 };
 /** Depth goes back and up at 45°, half as long, as on a box's picture. */
 const BACK = 0.35;
+const FIELD_PX = 118;
 const LEAST_M = 0.3;
 const MOST_M = 6;
 
@@ -42,14 +44,19 @@ export function SizedTent({ sizes, tiers, onChange }: SizedTentProps) {
       min={LEAST_M}
       max={MOST_M}
       onCommit={set(key)}
-      className="w-29.5"
+      className="w-29.5 shrink-0"
       {...(hint && { hint })}
     />
   );
   return (
-    <div className="grid grid-cols-[118px_minmax(0,400px)_118px] gap-x-3 max-md:grid-cols-2 max-md:gap-y-4 lg:justify-start">
-      <div className="col-start-2 pl-6 max-md:col-start-1 max-md:pl-0">{field('widthM', 'Width inside')}</div>
-      <div className="max-md:col-start-2 max-md:row-start-1">{field('depthM', 'Depth inside')}</div>
+    <div className="grid grid-cols-[118px_minmax(0,520px)] gap-x-3 max-md:grid-cols-2 max-md:gap-y-4 lg:justify-start">
+      <div
+        className="col-start-2 flex gap-x-(--gap) pl-6 max-md:col-span-2 max-md:col-start-1 max-md:gap-x-4 max-md:pl-0"
+        style={{ '--gap': `${Math.max(12, right + back + 12 - left - FIELD_PX)}px` } as CSSProperties}
+      >
+        {field('widthM', 'Width inside')}
+        {field('depthM', 'Depth inside')}
+      </div>
       <div className="col-start-1 self-center max-md:col-span-2 max-md:self-start">
         {field('heightM', 'Height inside', '6 ft, 72 in and 180 cm are read alike.')}
       </div>
