@@ -17,15 +17,15 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
-          include: ['tests/**/*.test.ts', 'tests/**/*.test.tsx'],
-          exclude: ['tests/**/*.db.test.ts', 'tests/e2e/**'],
+          include: ['tests/**/*.test.{ts,tsx,mjs}'],
+          exclude: ['tests/**/*.db.test.{ts,mjs}', 'tests/e2e/**'],
         },
       },
       {
         extends: true,
         test: {
           name: 'database',
-          include: ['tests/**/*.db.test.ts'],
+          include: ['tests/**/*.db.test.{ts,mjs}'],
           globalSetup: ['tests/support/database.ts'],
           fileParallelism: false,
           testTimeout: 30_000,

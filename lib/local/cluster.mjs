@@ -1,7 +1,17 @@
 import { createHash, randomBytes } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import {
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  readlinkSync,
+  realpathSync,
+  renameSync,
+  rmSync,
+  writeFileSync,
+} from 'node:fs';
 import path from 'node:path';
 import { freePort, isFree } from './ports.mjs';
+import { processesWhere } from './processes.mjs';
 import { asPostgres, giveToPostgres, isRoot, postgresTool } from './postgres-tools.mjs';
 import { arrangeRoles, roleName, SUPERUSER } from './roles.mjs';
 import { run } from './run.mjs';
@@ -83,7 +93,24 @@ async function settledServer(folder) {
   }
 }
 
+/** Every process of a PostgreSQL server works in its data folder. */
+function anyoneIn(folder) {
+  const real = realpathSync(folder);
+  return processesWhere((pid) => readlinkSync(`/proc/${pid}/cwd`) === real).length > 0;
+}
+
+/**
+ * Takes away the note of a server that was killed. Its process id may belong to a stranger by now, or to a zombie that nobody has
+ * buried; the server would then refuse to start. Only when no process works in the folder any more: its backends outlive it a little.
+ */
+async function clearStaleNote(folder) {
+  const until = Date.now() + 10_000;
+  while (anyoneIn(folder) && Date.now() < until) await pause(50);
+  if (!anyoneIn(folder)) rmSync(path.join(folder, 'postmaster.pid'), { force: true });
+}
+
 async function startServer({ folder, port, as, durable }) {
+  await clearStaleNote(folder);
   const settings = [`-p ${port}`, '-c listen_addresses=127.0.0.1', "-c unix_socket_directories=''"];
   settings.push('-c max_connections=60');
   if (!durable) settings.push('-c fsync=off', '-c synchronous_commit=off', '-c full_page_writes=off');

@@ -1,6 +1,6 @@
-import { readdirSync, readFileSync, rmSync } from 'node:fs';
+import { readFileSync, rmSync } from 'node:fs';
 import path from 'node:path';
-import { lives, signal, whoAmI } from './processes.mjs';
+import { lives, processesWhere, signal, whoAmI } from './processes.mjs';
 import { Stop } from './say.mjs';
 import { recall, remember } from './state-file.mjs';
 
@@ -28,16 +28,7 @@ export function takeTurn(stateFolder, what = 'Cellarsun is running') {
 /** Processes of an earlier start of this checkout whose script is gone. */
 function leftovers(mark) {
   const needle = `${MARK}=${mark}\0`;
-  return readdirSync('/proc')
-    .filter((name) => /^\d+$/.test(name) && Number(name) !== process.pid)
-    .filter((name) => {
-      try {
-        return readFileSync(`/proc/${name}/environ`, 'utf8').includes(needle);
-      } catch {
-        return false;
-      }
-    })
-    .map(Number);
+  return processesWhere((pid) => readFileSync(`/proc/${pid}/environ`, 'utf8').includes(needle));
 }
 
 /** Ends what a killed start left running: its app, a package installation, a build. */

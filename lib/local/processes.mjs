@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 
 /** When a process began, in the kernel's ticks; with its id this names it for good. Null when it is gone. */
 export function birthOf(pid) {
@@ -20,4 +20,18 @@ export function signal(pid, name) {
   } catch {
     // It ended by itself in the meantime.
   }
+}
+
+/** Ids of the processes for which the question is answered yes; those that are gone or not ours to ask are left out. */
+export function processesWhere(question) {
+  return readdirSync('/proc')
+    .filter((name) => /^\d+$/.test(name) && Number(name) !== process.pid)
+    .map(Number)
+    .filter((pid) => {
+      try {
+        return question(pid);
+      } catch {
+        return false;
+      }
+    });
 }
