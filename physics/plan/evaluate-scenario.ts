@@ -134,7 +134,14 @@ function designAssumptions(
   ];
 }
 
-function warningsOf(scenario: ResolvedScenario, heat: HeatResult, year: YearResult, withYear: boolean): string[] {
+interface Warned {
+  heat: HeatResult;
+  year: YearResult;
+  room: RoomYear;
+  withYear: boolean;
+}
+
+function warningsOf(scenario: ResolvedScenario, { heat, year, room, withYear }: Warned): string[] {
   const warnings: string[] = [];
   const { reflectance } = scenario.tent;
   if (scenario.placements.length > 0 && Object.values(reflectance).some((value) => value > 0))
@@ -146,6 +153,10 @@ function warningsOf(scenario: ResolvedScenario, heat: HeatResult, year: YearResu
   if (withYear && year.months.some(({ airTempC }) => airTempC.min <= COLDEST_C || airTempC.max >= HOTTEST_C))
     warnings.push(
       `In some hours nothing holds the tent's temperature: it is reckoned no further than ${COLDEST_C} and ${HOTTEST_C} °C. Check the lamps' watts and what the fabric, the floor and the air let through.`,
+    );
+  if (room.drawnIn)
+    warnings.push(
+      "Some months of the room's series would, joined smoothly, pass what a room's air can be; there the hours are drawn in towards the month's mean, which is kept.",
     );
   if (heat.freeFloatTempC.light === null || heat.freeFloatTempC.dark === null)
     warnings.push('Nothing lets heat out of this tent, so unheated it has no steady temperature.');
@@ -194,7 +205,7 @@ export function evaluateScenario(
     upFront: { costMinor: upFrontMinor(scenario) },
     cautions: cautionsFor({ scenario, slipTempC, ...facts }),
     assumptions: [...assumptions, ...designAssumptions(scenario, room)],
-    warnings: warningsOf(scenario, heat, year, withYear),
+    warnings: warningsOf(scenario, { heat, year, room, withYear }),
     elapsedMs: { light: lightMs, year: yearMs },
   };
 }

@@ -1,7 +1,7 @@
 import { percentile } from '../light/tier-light';
 import type { ResolvedScenario } from '../plan/resolved-scenario';
 import type { Series } from '../plan/scenario-document';
-import { hourlyValues } from './series';
+import { drawIn, hourlyValues } from './series';
 
 /** The room over a year, one value for each hour of local standard time; read only. */
 export interface RoomYear {
@@ -10,21 +10,25 @@ export interface RoomYear {
   /** 1st and 99th percentile of the hours' temperature. */
   coldTempC: number;
   hotTempC: number;
+  /** Some month could not be joined to its neighbours as steeply as it should be. */
+  drawnIn: boolean;
 }
 
-function make(room: ResolvedScenario['room'], year: number): RoomYear {
-  const roomTempC = hourlyValues(room.airTempC, year);
-  const humidity = hourlyValues(room.relHumidityPct, year);
-  const [coldTempC, hotTempC]: [number, number] =
-    room.airTempC.kind === 'constant'
-      ? [room.airTempC.value, room.airTempC.value]
-      : [percentile(roomTempC, 0.01), percentile(roomTempC, 0.99)];
+/** What a room's air may be; joined months and swings are kept within. */
+const TEMPERATURE = { least: -60, most: 70 };
+const HUMIDITY = { least: 0, most: 100 };
+
+function make({ airTempC, relHumidityPct }: ResolvedScenario['room'], year: number): RoomYear {
+  const roomTempC = hourlyValues(airTempC, year);
+  const roomRelHumidityPct = hourlyValues(relHumidityPct, year);
+  const drawn = [drawIn(roomTempC, year, TEMPERATURE), drawIn(roomRelHumidityPct, year, HUMIDITY)];
+  const still = airTempC.kind === 'constant';
   return {
     roomTempC,
-    // Joining months by straight lines may overshoot a little past what air can hold.
-    roomRelHumidityPct: humidity.map((pct) => Math.min(100, Math.max(0, pct))),
-    coldTempC,
-    hotTempC,
+    roomRelHumidityPct,
+    coldTempC: still ? airTempC.value : percentile(roomTempC, 0.01),
+    hotTempC: still ? airTempC.value : percentile(roomTempC, 0.99),
+    drawnIn: drawn.includes(true),
   };
 }
 

@@ -45,6 +45,44 @@ function joinMonths(values: readonly number[], year: number): Float64Array {
   return series;
 }
 
+interface Bounds {
+  least: number;
+  most: number;
+}
+
+/**
+ * Keeps a year within bounds without touching any month's mean: where hours would pass a bound, that month's hours are drawn in
+ * towards its mean. Steep months overshoot when they are joined by straight lines, and humidity near 100 % has little room.
+ *
+ * @returns whether any month was drawn in
+ */
+export function drawIn(values: Float64Array, year: number, { least, most }: Bounds): boolean {
+  let drawn = false;
+  let start = 0;
+  for (let month = 1; month <= 12; month += 1) {
+    const hours = values.subarray(start, start + daysInMonth(year, month) * HOURS);
+    start += hours.length;
+    let sum = 0;
+    let low = Infinity;
+    let high = -Infinity;
+    for (const value of hours) {
+      sum += value;
+      low = Math.min(low, value);
+      high = Math.max(high, value);
+    }
+    if (low >= least && high <= most) continue;
+    drawn = true;
+    const mean = Math.min(most, Math.max(least, sum / hours.length));
+    const room = Math.min(
+      high > most ? (most - mean) / (high - mean) : 1,
+      low < least ? (mean - least) / (mean - low) : 1,
+    );
+    for (let hour = 0; hour < hours.length; hour += 1)
+      hours[hour] = Math.min(most, Math.max(least, mean + room * (hours[hour]! - mean)));
+  }
+  return drawn;
+}
+
 /**
  * The hours of a year of a series, in local standard time.
  *
