@@ -48,8 +48,12 @@ export function TentFrame(props: TentFrameProps) {
       <header className={`border-b border-line ${edge} print:hidden`}>
         <div className="grid grid-cols-[minmax(0,452px)_minmax(0,1fr)_auto] gap-x-6 max-lg:grid-cols-[minmax(0,1fr)_auto]">
           <div className="flex min-w-0 flex-col justify-between pt-2">
-            <p className="flex flex-wrap items-baseline gap-x-6">
-              <span className="text-22 font-semibold max-md:text-17">{tent.name}</span>
+            <div className="flex flex-wrap items-baseline gap-x-6">
+              {headline ? (
+                <span className="text-22 font-semibold max-md:text-17">{tent.name}</span>
+              ) : (
+                <h1 className="text-22 font-semibold max-md:text-17">{tent.name}</h1>
+              )}
               <span className="text-12 text-ink-soft">
                 {room.roomId ? (
                   <TextLink href={`/gardens/${gardenId}/rooms/${room.roomId}`} look="opens" className="text-ink-soft">
@@ -63,7 +67,7 @@ export function TentFrame(props: TentFrameProps) {
                   all rooms
                 </TextLink>
               </span>
-            </p>
+            </div>
             <PageNames names={namesOf(props)} className="max-lg:hidden" />
           </div>
           <div className="flex min-w-0 flex-wrap items-end gap-x-8 max-lg:order-last max-lg:col-span-2">
