@@ -23,14 +23,26 @@ function digitsFor(value: number): number {
   return Math.min(6, 1 - Math.floor(Math.log10(size)));
 }
 
-/** A figure of an explanation in the person's units. */
-export function explainedFigure(value: number, unit: string, system: UnitSystem): { figure: string; unit: string } {
+/** Decimals that all figures of one unit in a sum share, so that what is shown adds up. */
+export function sharedDigits(values: readonly number[]): number {
+  const largest = Math.max(0, ...values.map(Math.abs));
+  const digits = digitsFor(largest);
+  return values.length > 2 && largest >= 100 && largest < 10_000 ? digits + 1 : digits;
+}
+
+/** A figure of an explanation in the person's units; without shared decimals it takes as many as it needs. */
+export function explainedFigure(
+  value: number,
+  unit: string,
+  system: UnitSystem,
+  digits?: number,
+): { figure: string; unit: string } {
   const kind = KINDS[unit];
   if (kind && system === 'us') {
     const shown = formatQuantity(value, kind, system);
     return { figure: shown.figure, unit: shown.unit };
   }
-  const digits = digitsFor(value);
-  const figure = figureText(value, digits);
+  if (digits !== undefined) return { figure: figureText(value, digits), unit };
+  const figure = figureText(value, digitsFor(value));
   return { figure: figure.includes('.') ? figure.replace(/\.?0+$/, '') : figure, unit };
 }

@@ -2,7 +2,7 @@
 
 import { useEffect, useRef } from 'react';
 import type { Explanation, ExplanationTerm } from '@/lib/evaluation/evaluate-scenario';
-import { explainedFigure } from './explain-figures';
+import { explainedFigure, sharedDigits } from './explain-figures';
 import { ExplainRange } from './explain-range';
 import { useExplain } from './explain-context';
 import { Num } from './num';
@@ -53,19 +53,42 @@ export function ExplainSheet() {
   );
 }
 
+/** Terms that are added share their decimals with the result; factors take their own. */
+function digitsOf({ terms, result }: Explanation): (unit: string) => number | undefined {
+  const added = terms.length > 1 && terms.every((term) => term.operator !== '×' && term.operator !== '÷');
+  const stem = (unit: string) => unit.replace(/\/d$/, '');
+  return (unit) => {
+    if (!added) return undefined;
+    const alike = [...terms, result].filter((each) => stem(each.unit) === stem(unit));
+    return sharedDigits(alike.map((each) => each.value));
+  };
+}
+
 function Sum({ explanation }: { explanation: Explanation }) {
   const units = useUnits();
   const { follow } = useExplain();
-  const result = explainedFigure(explanation.result.value, explanation.result.unit, units);
+  const digits = digitsOf(explanation);
+  const result = explainedFigure(
+    explanation.result.value,
+    explanation.result.unit,
+    units,
+    digits(explanation.result.unit),
+  );
   return (
     <table className="mt-1 w-full border-collapse">
       <caption className="sr-only">The sum</caption>
       <tbody>
         {explanation.terms.map((term, at) => (
           <tr key={at} className="align-baseline">
-            <td className="w-4 py-1 text-14 text-ink-soft">{at === 0 && term.operator === '+' ? '' : term.operator}</td>
+            <td className="w-6 py-1 pr-2 text-14 text-ink-soft">
+              {at === 0 && term.operator === '+' ? '' : term.operator}
+            </td>
             <td className="py-1 pr-1.5 text-right text-17 whitespace-nowrap">
-              <TermFigure term={term} follow={() => follow(term.path!, `${result.figure} ${result.unit}`)} />
+              <TermFigure
+                term={term}
+                digits={digits(term.unit)}
+                follow={() => follow(term.path!, `${result.figure} ${result.unit}`)}
+              />
             </td>
             <td className="py-1 pr-3 text-12 whitespace-nowrap text-ink-soft">
               {explainedFigure(term.value, term.unit, units).unit}
@@ -89,8 +112,14 @@ function Sum({ explanation }: { explanation: Explanation }) {
   );
 }
 
-function TermFigure({ term, follow }: { term: ExplanationTerm; follow: () => void }) {
-  const { figure } = explainedFigure(term.value, term.unit, useUnits());
+interface TermFigureProps {
+  term: ExplanationTerm;
+  digits: number | undefined;
+  follow: () => void;
+}
+
+function TermFigure({ term, digits, follow }: TermFigureProps) {
+  const { figure } = explainedFigure(term.value, term.unit, useUnits(), digits);
   if (!term.path) return <Num text={figure} />;
   return (
     <button
@@ -122,12 +151,19 @@ function WentIn({ explanation }: { explanation: Explanation }) {
             </span>
           </li>
         ))}
-        {explanation.sources.map((source) => (
-          <li key={source} className="border-b border-line py-1.5 text-ink-soft">
-            {source}
-          </li>
-        ))}
       </ul>
+      {explanation.sources.length > 0 && (
+        <>
+          <h3 className="pt-3 text-14 font-semibold">What it rests on</h3>
+          <ul className="text-12 text-ink-soft">
+            {explanation.sources.map((source) => (
+              <li key={source} className="border-b border-line py-1.5">
+                {source}
+              </li>
+            ))}
+          </ul>
+        </>
+      )}
     </>
   );
 }

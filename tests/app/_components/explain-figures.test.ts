@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { explainedFigure } from '@/app/_components/explain-figures';
+import { explainedFigure, sharedDigits } from '@/app/_components/explain-figures';
 import { roundAxis } from '@/app/_components/explain-range';
 
 describe('a figure of an explanation', () => {
@@ -17,6 +17,17 @@ describe('a figure of an explanation', () => {
   it('is read in the person’s units (exact definition: 0 °C is 32 °F, 1 cfm is 1.699 m³/h)', () => {
     expect(explainedFigure(0, '°C', 'us')).toEqual({ figure: '32.0', unit: '°F' });
     expect(explainedFigure(169.9, 'm³/h', 'us')).toEqual({ figure: '100', unit: 'cfm' });
+  });
+});
+
+describe('a sum as it is shown', () => {
+  it('adds up to what stands under its line', () => {
+    const terms = [251.93, 257.41, 6.29, 3.77];
+    const total = terms.reduce((sum, term) => sum + term, 0);
+    const digits = sharedDigits([...terms, total]);
+    const shown = terms.map((term) => Number(term.toFixed(digits))).reduce((sum, term) => sum + term, 0);
+    expect(Math.abs(shown - Number(total.toFixed(digits)))).toBeLessThanOrEqual(0.1 + 1e-9);
+    expect(digits).toBe(1);
   });
 });
 
