@@ -17,6 +17,8 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
+          // Thousands of random cases take their time on a busy machine.
+          testTimeout: 30_000,
           include: ['tests/**/*.test.{ts,tsx,mjs}'],
           exclude: ['tests/**/*.db.test.{ts,mjs}', 'tests/e2e/**'],
         },

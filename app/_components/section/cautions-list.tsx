@@ -34,7 +34,7 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
             <button
               type="button"
               aria-expanded={open === i}
-              className="cursor-pointer border-b border-dotted border-ink-soft py-0.5 text-left"
+              className="cursor-pointer border-b border-dotted border-ink-soft py-1 text-left"
               onClick={() => setOpen(open === i ? null : i)}
             >
               {cautionHead(caution.text)}
@@ -51,7 +51,7 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
       {cautions.length > most && (
         <button
           type="button"
-          className="cursor-pointer border-b border-dotted border-ink-soft py-0.5 text-12 text-ink-soft"
+          className="cursor-pointer border-b border-dotted border-ink-soft py-1 text-12 text-ink-soft"
           onClick={() => setAll(!all)}
         >
           {all ? 'Fewer' : `${cautions.length - most} more`}
