@@ -18,9 +18,10 @@ import { arrangeServer, buildEnvironment, reports } from './test-server.mjs';
 import { throwAwayCluster } from './throw-away.mjs';
 
 const mark = { [MARK]: reports };
-const base = { ...process.env, ...mark, NEXT_TELEMETRY_DISABLED: '1', CI: '1' };
+const base = { ...process.env, ...mark, NEXT_TELEMETRY_DISABLED: '1', CI: '1', NO_COLOR: '1' };
 // What a person set for their own server is not for the tests.
-for (const name of ['DATABASE_URL', 'DATABASE_AUTH_URL', 'DATABASE_OWNER_URL', 'NODE_ENV', 'PORT']) delete base[name];
+for (const name of ['DATABASE_URL', 'DATABASE_AUTH_URL', 'DATABASE_OWNER_URL', 'NODE_ENV', 'PORT', 'FORCE_COLOR'])
+  delete base[name];
 const bin = (name) => path.join(root, 'node_modules', name);
 const NEXT = bin('next/dist/bin/next');
 

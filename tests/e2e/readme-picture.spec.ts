@@ -1,9 +1,11 @@
 import { copyFileSync, mkdirSync } from 'node:fs';
+import path from 'node:path';
 import { expect, test } from '@playwright/test';
 import { skerryPoint } from '../../lib/demo/skerry-point';
 
 const [owner] = skerryPoint.people;
-const FOLDER = '.data/test/pictures';
+const FILE = '.data/test/pictures/section.png';
+const IN_README = 'public/readme/section.png';
 
 test.use({ viewport: { width: 1280, height: 980 }, colorScheme: 'light' });
 
@@ -20,8 +22,8 @@ test('the README’s picture: the demo’s section, drawn with every tier’s da
   for (const tier of skerryPoint.scenarios[0].plan.tiers)
     await expect(page.getByText(new RegExp(`${tier.name}: [\\d.]+ mol a day`)).first()).toBeAttached();
 
-  mkdirSync(FOLDER, { recursive: true });
-  const file = `${FOLDER}/section.png`;
-  await page.screenshot({ path: file });
-  if (process.env['CELLARSUN_WRITE_PICTURES']) copyFileSync(file, 'public/readme/section.png');
+  for (const file of process.env['CELLARSUN_WRITE_PICTURES'] ? [FILE, IN_README] : [FILE])
+    mkdirSync(path.dirname(file), { recursive: true });
+  await page.screenshot({ path: FILE });
+  if (process.env['CELLARSUN_WRITE_PICTURES']) copyFileSync(FILE, IN_README);
 });
