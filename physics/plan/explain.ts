@@ -21,7 +21,7 @@ export interface ExplainContext {
  * @param path such as `tiers.t1.dli`, `heat.coldDark.heater`, `year.months.1.cost`, `circuits.c1.continuous`, `fixtures.f1.ppf`
  * @returns null where the path names no figure of this evaluation
  */
-export function explainFigure(document: ScenarioDocument, evaluation: Evaluation, path: string): Explanation | null {
+function partOf(document: ScenarioDocument, evaluation: Evaluation, path: string): Explanation | null {
   const context: ExplainContext = { document, evaluation, scenario: resolveScenario(document).scenario };
   const parts = path.split('.');
   switch (parts[0]) {
@@ -40,6 +40,24 @@ export function explainFigure(document: ScenarioDocument, evaluation: Evaluation
     default:
       return null;
   }
+}
+
+/**
+ * How a figure comes about: its formula, its terms with their standing, its range, its sources and what would make it surer.
+ *
+ * @param path such as `tiers.t1.dli`, `heat.coldDark.heater`, `year.months.1.cost`, `circuits.c1.continuous`
+ * @returns null where the path names no figure, or one that has no bound (a tent that loses no heat warms without end)
+ */
+export function explainFigure(document: ScenarioDocument, evaluation: Evaluation, path: string): Explanation | null {
+  const explanation = partOf(document, evaluation, path);
+  if (!explanation || !Number.isFinite(explanation.result.value)) return null;
+  const { range } = explanation;
+  const bounded = range !== null && Number.isFinite(range.low) && Number.isFinite(range.high);
+  return {
+    ...explanation,
+    terms: explanation.terms.filter((term) => Number.isFinite(term.value)),
+    range: bounded ? range : null,
+  };
 }
 
 /** Whether a figure was left to its default, so that its mark says so. */
