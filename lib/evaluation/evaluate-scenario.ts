@@ -3,7 +3,8 @@ export { evaluateScenario, type EvaluateOptions } from '@/physics/plan/evaluate-
 export { evaluateLightScene } from '@/physics/light/evaluate-light-scene';
 export { createLightCache, type LightCache } from '@/physics/light/light-field';
 export { verticalSlice, type SliceRequest, type VerticalSlice } from '@/physics/light/vertical-slice';
-export { explainFigure, type Explanation, type ExplanationTerm } from '@/physics/plan/explain';
+export { explainFigure } from './explain-figure';
+export type { Explanation, ExplanationTerm } from '@/physics/plan/explain';
 export { resolveScenario } from '@/physics/plan/resolve-scenario';
 export { physicsVersion } from '@/physics/plan/physics-version';
 export { defaults } from '@/physics/plan/defaults';

@@ -36,6 +36,7 @@ export function explainYear(context: ExplainContext, path: string, parts: readon
     const part = monthly ? each.year.months[index]! : each.year;
     return figure === 'cost' ? part.cost : part.energyKwh.total;
   };
+  const price = standingAt(evaluation, 'power.tariff');
   const period = monthly ? `month ${index + 1}` : 'the year';
   return {
     path,
@@ -52,6 +53,9 @@ export function explainYear(context: ExplainContext, path: string, parts: readon
     result: figure === 'cost' ? { value: of.cost, unit: currency } : { value: of.energyKwh.total, unit: 'kWh' },
     range: rangeOf(document, evaluation, read, 'year'),
     sources: [
+      ...(figure === 'cost'
+        ? [price.standing === 'given' ? 'Price: as given' : `Price: ${price.source.replace(/^Default: /, '')}`]
+        : []),
       sources.ISO6946.citation,
       sources.Graamans2017.citation,
       evaluation.warnings.find((text) => text.startsWith('The year')) ?? 'Computed',
@@ -87,8 +91,13 @@ export function explainCircuit({ evaluation, scenario }: ExplainContext, path: s
   };
 }
 
+/** How many minor units make one of a currency: 100 cents, 1 yen. */
+const minorUnits = (currency: string): number =>
+  10 ** (new Intl.NumberFormat('en', { style: 'currency', currency }).resolvedOptions().maximumFractionDigits ?? 2);
+
 export function explainUpFront({ evaluation, scenario }: ExplainContext, path: string): Explanation {
   const { currency } = scenario.power.tariff;
+  const minor = minorUnits(currency);
   const terms = scenario.fixtures.flatMap((fixture): ExplanationTerm[] => {
     const buy = Math.max(
       0,
@@ -98,7 +107,7 @@ export function explainUpFront({ evaluation, scenario }: ExplainContext, path: s
     return [
       {
         operator: '+',
-        value: (buy * fixture.priceMinor) / 100,
+        value: (buy * fixture.priceMinor) / minor,
         unit: currency,
         label: `${buy} × ${fixture.name}`,
         ...(fixture.priceMinor > 0
@@ -111,7 +120,7 @@ export function explainUpFront({ evaluation, scenario }: ExplainContext, path: s
     if (item && !item.owned)
       terms.push({
         operator: '+',
-        value: item.priceMinor / 100,
+        value: item.priceMinor / minor,
         unit: currency,
         label,
         standing: 'given',
@@ -125,16 +134,18 @@ export function explainUpFront({ evaluation, scenario }: ExplainContext, path: s
     title: 'Money up front',
     formula: 'what is placed and not had already × its price',
     terms,
-    result: { value: evaluation.upFront.costMinor / 100, unit: currency },
+    result: { value: evaluation.upFront.costMinor / minor, unit: currency },
     range: null,
     sources: ['Prices as given'],
     makesItSurer: 'Type the price of each lamp.',
   };
 }
 
-export function explainFixture({ scenario }: ExplainContext, path: string, id: string): Explanation | null {
-  const fixture = scenario.fixtures.find((each) => each.id === id);
+export function explainFixture({ evaluation, scenario }: ExplainContext, path: string, id: string): Explanation | null {
+  const index = scenario.fixtures.findIndex((each) => each.id === id);
+  const fixture = scenario.fixtures[index];
   if (!fixture) return null;
+  const from = standingAt(evaluation, `fixtures[${index}].ppfUmolS`);
   return {
     path,
     title: `${fixture.name}: photons`,
@@ -145,8 +156,8 @@ export function explainFixture({ scenario }: ExplainContext, path: string, id: s
         value: fixture.ppfUmolS,
         unit: 'µmol/s',
         label: 'photon flux',
-        standing: 'given',
-        source: 'Given with the lamp',
+        standing: from.standing,
+        source: from.standing === 'given' ? 'Given with the lamp' : from.source,
       },
     ],
     result: { value: fixture.ppfUmolS, unit: 'µmol/s' },

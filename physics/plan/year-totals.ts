@@ -2,6 +2,7 @@ import type { TentState } from '../heat/tent-state';
 import { tentCost } from '../power/bill';
 import { daysInMonth } from '../schedule/local-year';
 import type { Device, EnergyByDevice, MonthResult, YearResult } from './evaluation-document';
+import { PeakMean } from './peak-mean';
 import type { ResolvedScenario } from './resolved-scenario';
 
 export const DEVICES: readonly Device[] = ['light', 'heater', 'exhaust', 'circulation', 'pump'];
@@ -10,7 +11,7 @@ interface Stretch {
   /** Before tax, major units a kWh. */
   price: number;
   powerW: Record<Device, number>;
-  /** Highest five-minute mean. */
+  /** All devices together, the pump at its highest five-minute mean. */
   peakW: number;
   state: TentState;
   unmetK: number;
@@ -61,7 +62,7 @@ function widen(into: { min: number; sum: number; max: number }, value: number, h
 /** Adds up a year, stretch by stretch. Months are those of the wall clock. */
 export class YearTotals {
   private readonly months = Array.from({ length: 12 }, emptyMonth);
-  private peakW = 0;
+  private readonly peak = new PeakMean();
 
   constructor(
     private readonly year: number,
@@ -83,7 +84,7 @@ export class YearTotals {
     sums.overheatKh += overK * hours;
     sums.condensationH += sweats ? hours : 0;
     sums.waterL += state.evaporationKgH * hours;
-    this.peakW = Math.max(this.peakW, peakW);
+    this.peak.add(hours, peakW);
   }
 
   /**
@@ -143,7 +144,7 @@ export class YearTotals {
       cost: months.reduce((sum, month) => sum + month.cost, 0),
       costByDevice,
       co2Kg: (energyKwh.total * this.power.co2GKwh) / 1000,
-      peakPowerW: this.peakW,
+      peakPowerW: this.peak.result(),
       netLightEnergyKwh: 0,
       heaterCyclesPerH: 0,
     };
