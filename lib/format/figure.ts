@@ -1,5 +1,5 @@
 const MINUS = '−';
-const THIN_SPACE = ' ';
+const THIN_SPACE = '\u202f';
 
 /** A number as people read it: a true minus, thin spaces in thousands, and just so many digits. */
 export function figureText(value: number, digits: number): string {

@@ -37,7 +37,7 @@ export function formatMoney(major: number, currency: string, options: { digits?:
   const most = Math.log10(minorPerMajor(currency));
   const digits = options.digits ?? (Math.abs(major) >= 1000 ? 0 : most);
   const figure = figureText(major, Math.min(digits, Math.max(most, digits)));
-  return `${figure.startsWith('−') ? '−' : ''}${currencySymbol(currency)} ${figure.replace('−', '')}`;
+  return `${figure.startsWith('−') ? '−' : ''}${currencySymbol(currency)}\u00a0${figure.replace('−', '')}`;
 }
 
 export const formatMinor = (minor: number, currency: string): string =>

@@ -17,7 +17,7 @@ const VULGAR: Record<string, string> = {
  * is a decimal comma.
  */
 export function parseNumber(text: string): number | null {
-  let plain = text.trim().replaceAll('−', '-').replaceAll(/[   ]/g, ' ');
+  let plain = text.trim().replaceAll('−', '-').replaceAll(/\s/g, ' ');
   const fraction = /^([+-]?)(?:(\d+) )?(\d+)\/(\d+)$/.exec(plain);
   if (fraction) {
     const [, sign, whole, over, under] = fraction;

@@ -21,7 +21,7 @@ export interface FormattedQuantity {
   text: string;
 }
 
-const NO_BREAK = ' ';
+const NO_BREAK = '\u00a0';
 
 /** A stored value in the units that a person reads. The only place, with `parseQuantity`, that converts for people. */
 export function formatQuantity(
@@ -74,7 +74,7 @@ function parseCompound(text: string, rule: QuantityRule): number | null {
  */
 export function parseQuantity(text: string, kind: QuantityKind, system: UnitSystem): ParsedQuantity {
   const rule = ruleOf(kind);
-  const typed = text.trim().replaceAll(/[  ]/g, ' ');
+  const typed = text.trim().replaceAll(/\s/g, ' ');
   if (typed === '') return { ok: false, problem: `Type ${rule.noun} such as ${rule.examples}.` };
   if (kind === 'latitude' || kind === 'longitude') return parseCoordinate(typed, kind);
   const compound = parseCompound(typed, rule);

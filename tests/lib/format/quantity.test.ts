@@ -85,12 +85,12 @@ describe('parseQuantity', () => {
 
 describe('what people read', () => {
   it('prints a true minus, thin spaces and the digits of the kind', () => {
-    expect(figureText(-1234.56, 1)).toBe('−1 234.6');
+    expect(figureText(-1234.56, 1)).toBe('−1\u202f234.6');
     expect(figureText(-0.001, 1)).toBe('0.0');
-    expect(formatQuantity(15.6, 'temperature', 'us').text).toBe('60.1 °F');
-    expect(formatQuantity(0.36, 'length', 'metric').text).toBe('36 cm');
-    expect(formatMoney(54.6, 'EUR')).toBe('€ 54.60');
-    expect(formatMoney(-1240.4, 'GBP')).toBe('−£ 1 240');
+    expect(formatQuantity(15.6, 'temperature', 'us').text).toBe('60.1\u00a0°F');
+    expect(formatQuantity(0.36, 'length', 'metric').text).toBe('36\u00a0cm');
+    expect(formatMoney(54.6, 'EUR')).toBe('€\u00a054.60');
+    expect(formatMoney(-1240.4, 'GBP')).toBe('−£\u00a01\u202f240');
   });
 
   it('signs a difference and calls what rounds to nothing the same', () => {
