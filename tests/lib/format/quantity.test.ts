@@ -101,7 +101,7 @@ describe('what people read', () => {
 
   it('names the range in the person’s units', () => {
     expect(rangeProblem({ value: 3, min: 0, max: 2.4384, kind: 'tallLength', system: 'us' })).toBe(
-      'Give at most 8.00 ft.',
+      'Give at most 8.00\u00a0ft.',
     );
   });
 });
