@@ -18,5 +18,7 @@ export function freeFloat({ tent, room, gainW }: { tent: TentModel; room: RoomAi
   const conductanceWK = tent.fabricWK + tent.floorWK + airWK;
   if (conductanceWK === 0) return { tempC: gainW > 0 ? null : room.tempC, conductanceWK };
   const floorW = tent.floorWK * (room.tempC - room.slabTempC);
-  return { tempC: room.tempC + (gainW - floorW) / conductanceWK, conductanceWK };
+  const tempC = room.tempC + (gainW - floorW) / conductanceWK;
+  // A conductance next to nothing would warm it beyond all numbers.
+  return { tempC: Number.isFinite(tempC) ? tempC : null, conductanceWK };
 }

@@ -15,12 +15,7 @@ export interface ExplainContext {
   evaluation: Evaluation;
 }
 
-/**
- * How a figure comes about: its formula, its terms with their standing, its range, its sources and what would make it surer.
- *
- * @param path such as `tiers.t1.dli`, `heat.coldDark.heater`, `year.months.1.cost`, `circuits.c1.continuous`, `fixtures.f1.ppf`
- * @returns null where the path names no figure of this evaluation
- */
+/** The explanation of a figure by the first part of its path. */
 function partOf(document: ScenarioDocument, evaluation: Evaluation, path: string): Explanation | null {
   const context: ExplainContext = { document, evaluation, scenario: resolveScenario(document).scenario };
   const parts = path.split('.');

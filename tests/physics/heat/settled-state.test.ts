@@ -160,6 +160,7 @@ describe('the tent worked by hand, unheated', () => {
     const closed = { ...tent, fabricWK: 0, floorWK: 0, leakageM3H: 0 };
     expect(freeFloat({ tent: closed, room, gainW: 1 }).tempC).toBeNull();
     expect(freeFloat({ tent: closed, room, gainW: 0 }).tempC).toBe(15.6);
+    expect(freeFloat({ tent: { ...closed, fabricWK: 5e-324 }, room, gainW: 1 }).tempC).toBeNull();
   });
 });
 
