@@ -37,21 +37,20 @@ describe('signing in', () => {
 
   it('takes as long for an address that nobody has as for a wrong passphrase', async () => {
     const { email } = await account();
-    const time = async (address: string) => {
-      const times: number[] = [];
-      for (let i = 0; i < 7; i += 1) {
+    const unknown = 'nobody-at-all@tests.example';
+    const fastest = { [email]: Infinity, [unknown]: Infinity };
+    // In turn, and the fastest of many: what else the machine does slows both alike and counts for neither.
+    for (let i = 0; i < 12; i += 1) {
+      for (const address of [email, unknown]) {
         const from = performance.now();
         await checkSignIn({ email: address, password: 'wrong wrong wrong wrong', headers: {} });
-        times.push(performance.now() - from);
+        fastest[address] = Math.min(fastest[address]!, performance.now() - from);
       }
-      return times.sort((a, b) => a - b)[3]!;
-    };
-    await time(email);
-    const known = await time(email);
-    const unknown = await time('nobody-at-all@tests.example');
+    }
+    const ratio = fastest[unknown]! / fastest[email]!;
     // One hash each; without it the unknown address would answer in a tenth of the time.
-    expect(unknown / known).toBeGreaterThan(0.5);
-    expect(unknown / known).toBeLessThan(2);
+    expect(ratio).toBeGreaterThan(0.5);
+    expect(ratio).toBeLessThan(2);
   });
 
   it('stops counting for nobody: after too many attempts even the right passphrase is refused', async () => {
