@@ -41,7 +41,7 @@ export function CompareView({ garden, choices, comparison }: CompareViewProps) {
   };
   return (
     <PageFrame garden={garden} current="compare" crumbs={[{ words: 'compare' }]} headline={headline(columns, base)}>
-      <div className="overflow-x-auto pt-8">
+      <div className="relative overflow-x-auto pt-8">
         <CompareTable columns={columns} base={base} gardenId={garden.gardenId} />
       </div>
       <CostAgainstLight columns={columns} />

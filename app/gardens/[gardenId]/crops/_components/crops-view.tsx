@@ -98,7 +98,7 @@ export function CropsView({ garden, crops, targets: initial, grown, mayEdit }: C
           ))}
         </ul>
       </div>
-      <div ref={ref} className="overflow-x-auto pt-4">
+      <div ref={ref} className="relative overflow-x-auto pt-4">
         <table className="w-full text-14" style={{ minWidth: 640 }}>
           <caption className="sr-only">Daily light, hours and temperatures by crop and stage</caption>
           <thead>

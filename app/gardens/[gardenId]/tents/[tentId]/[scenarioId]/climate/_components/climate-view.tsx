@@ -112,7 +112,7 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
   const unit = formatQuantity(0, 'temperature', units).unit;
   const plain = (value: number, digits = 0) => value.toFixed(digits);
   return (
-    <div className="overflow-x-auto pt-4">
+    <div className="relative overflow-x-auto pt-4">
       <table className="w-full min-w-[44rem] text-14">
         <caption className="sr-only">Temperature, humidity and water by month</caption>
         <thead>
