@@ -1,58 +1,103 @@
-import AxeBuilder from '@axe-core/playwright';
 import { expect, test, type Page } from '@playwright/test';
+import { isAccessible, keyboard, mouse, type Hand } from './walk';
 
-async function isAccessible(page: Page, where: string) {
-  const { violations } = await new AxeBuilder({ page })
-    .withTags(['wcag2a', 'wcag2aa', 'wcag21aa', 'wcag22aa'])
-    .analyze();
-  const words = violations.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.target.join(' ')).join(', ')}`);
-  expect(words, where).toEqual([]);
-  const wide = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
-  expect(wide, `${where} scrolls sideways`).toBeLessThanOrEqual(0);
+const ways = [
+  { name: 'by mouse, light, 1280 px', colorScheme: 'light', width: 1280, height: 860, keys: false },
+  { name: 'by mouse, dark, 360 px', colorScheme: 'dark', width: 360, height: 740, keys: false },
+  { name: 'by keyboard alone, dark, 1280 px', colorScheme: 'dark', width: 1280, height: 860, keys: true },
+  { name: 'by keyboard alone, light, 360 px', colorScheme: 'light', width: 360, height: 740, keys: true },
+] as const;
+
+async function signUp(page: Page, hand: Hand) {
+  await page.goto('/sign-up');
+  await isAccessible(page, 'sign-up');
+  await hand.fill(page.getByLabel('Name that others see'), 'Ines');
+  await hand.fill(page.getByLabel('E-mail'), `ines-${crypto.randomUUID()}@tests.example`);
+  await hand.fill(page.getByLabel('Passphrase', { exact: true }), 'slow green kettle on the sill');
+  await hand.press(page.getByRole('button', { name: 'Sign up' }));
+  await page.waitForURL(/\/gardens/);
 }
 
-for (const { colorScheme, width, height } of [
-  { colorScheme: 'light', width: 1280, height: 860 },
-  { colorScheme: 'dark', width: 360, height: 740 },
-] as const) {
-  test.describe(`${colorScheme}, ${width} px`, () => {
+async function makeGarden(page: Page, hand: Hand): Promise<string> {
+  await page.goto('/gardens/new');
+  await isAccessible(page, 'a new garden');
+  await hand.fill(page.getByLabel('Name of the garden'), 'Sill and cellar');
+  await hand.press(page.getByRole('button', { name: /Make the garden/ }));
+  await page.waitForURL(/\/gardens\/[0-9a-f-]{36}/);
+  return /gardens\/([0-9a-f-]{36})/.exec(page.url())![1]!;
+}
+
+async function addRoom(page: Page, hand: Hand, garden: string) {
+  await page.goto(`${garden}/rooms/new`);
+  await isAccessible(page, 'a new room');
+  await hand.fill(page.getByLabel('Name of the room'), 'Cellar');
+  await hand.fill(page.getByLabel('Coldest month, mean of its air'), '9 C');
+  await hand.fill(page.getByLabel('Warmest month, mean of its air'), '64 F');
+  await hand.press(page.getByRole('button', { name: 'Add the room' }));
+  await page.waitForURL((url) => !url.pathname.endsWith('/rooms/new'));
+}
+
+async function addLamp(page: Page, hand: Hand, garden: string) {
+  await page.goto(`${garden}/fixtures/new`);
+  await isAccessible(page, 'a new lamp');
+  await hand.fill(page.getByLabel('Name', { exact: true }), 'Bar');
+  await hand.fill(page.getByLabel('Power from the socket'), '40');
+  await hand.fill(page.getByLabel('Photons, PPF'), '104');
+  await hand.fill(page.getByLabel('Length of the lit face'), '80 cm');
+  await hand.fill(page.getByLabel('Width of the lit face'), '2 in');
+  await hand.press(page.getByRole('button', { name: 'Add this lamp' }));
+  await page.waitForURL(/\/fixtures\/[0-9a-f-]{36}/);
+  await isAccessible(page, 'a lamp');
+}
+
+async function addTent(page: Page, hand: Hand, garden: string) {
+  await page.goto(`${garden}/tents/new`);
+  await isAccessible(page, 'a new tent');
+  await hand.fill(page.getByLabel('Name of the tent'), 'First tent');
+  await hand.press(page.getByRole('button', { name: 'Add the tent' }));
+  await page.waitForURL(/\/tents\/[0-9a-f-]{36}\/[0-9a-f-]{36}/);
+  await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+}
+
+for (const { name, colorScheme, width, height, keys } of ways) {
+  test.describe(name, () => {
     test.use({ colorScheme, viewport: { width, height } });
 
-    test('a newcomer signs up, makes a garden and a room, and draws a tent', async ({ page, baseURL }) => {
-      test.setTimeout(180_000);
+    test('a newcomer signs up, draws a lit tent, tries another layout, compares the two and signs out', async ({
+      page,
+      baseURL,
+    }) => {
+      test.setTimeout(150_000);
+      const hand = keys ? keyboard(page) : mouse;
       const elsewhere: string[] = [];
       page.on('request', (request) => {
         if (!request.url().startsWith(baseURL!) && !/^(data|blob):/.test(request.url())) elsewhere.push(request.url());
       });
-      await page.goto('/sign-up');
-      await isAccessible(page, 'sign-up');
-      await page.getByLabel('Name that others see').fill('Ines');
-      await page.getByLabel('E-mail').fill(`ines-${Date.now()}-${width}@tests.example`);
-      await page.getByLabel('Passphrase', { exact: true }).fill('slow green kettle on the sill');
-      await page.getByRole('button', { name: 'Sign up' }).click();
-      await page.waitForURL(/\/gardens/);
+      await signUp(page, hand);
+      const gardenId = await makeGarden(page, hand);
+      const garden = `/gardens/${gardenId}`;
+      await addRoom(page, hand, garden);
+      await addLamp(page, hand, garden);
+      await addTent(page, hand, garden);
+      await isAccessible(page, 'the section of an empty tent');
+      await hand.press(page.getByRole('button', { name: /Hang .*lamp/ }).first());
+      await expect(page.getByText('Nothing to save yet')).toHaveCount(0);
+      await isAccessible(page, 'the section with a lamp');
 
-      await page.goto('/gardens/new');
-      await isAccessible(page, 'a new garden');
-      await page.getByLabel('Name of the garden').fill('Sill and cellar');
-      await page.getByRole('button', { name: /Make the garden/ }).click();
-      await page.waitForURL(/\/gardens\/[0-9a-f-]{36}/);
-      const gardenId = /gardens\/([0-9a-f-]{36})/.exec(page.url())![1]!;
+      const first = page.url();
+      await hand.press(page.getByRole('button', { name: 'Try another' }).first());
+      await page.waitForURL((url) => url.href !== first);
 
-      await page.goto(`/gardens/${gardenId}/rooms/new`);
-      await isAccessible(page, 'a new room');
-      await page.getByLabel('Name of the room').fill('Cellar');
-      await page.getByLabel('Coldest month, mean of its air').fill('9 C');
-      await page.getByLabel('Warmest month, mean of its air').fill('64 F');
-      await page.getByRole('button', { name: 'Add the room' }).click();
-      await page.waitForURL((url) => !url.pathname.endsWith('/rooms/new'));
-
-      await page.goto(`/gardens/${gardenId}/tents/new`);
-      await isAccessible(page, 'a new tent');
-      await page.getByLabel('Name of the tent').fill('First tent');
-      await page.getByRole('button', { name: 'Add the tent' }).click();
-      await page.waitForURL(/\/tents\/[0-9a-f-]{36}\/[0-9a-f-]{36}/);
+      await page.goto(`${garden}/compare`);
       await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+      await expect(page.getByRole('checkbox')).toHaveCount(2);
+      await isAccessible(page, 'compare');
+
+      await page.goto('/sign-out');
+      await hand.press(page.getByRole('button', { name: 'Sign out' }));
+      await page.waitForURL((url) => !url.pathname.includes('sign-out'));
+      await page.goto('/gardens');
+      await expect(page).toHaveURL(/sign-in/);
       expect(elsewhere).toEqual([]);
     });
   });
