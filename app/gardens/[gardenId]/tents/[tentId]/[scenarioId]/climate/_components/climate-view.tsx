@@ -112,7 +112,12 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
   const unit = formatQuantity(0, 'temperature', units).unit;
   const plain = (value: number, digits = 0) => value.toFixed(digits);
   return (
-    <div className="relative overflow-x-auto pt-4">
+    <div
+      className="relative overflow-x-auto pt-4"
+      tabIndex={0}
+      role="region"
+      aria-label="The year in the tent, by month"
+    >
       <table className="w-full min-w-[44rem] text-14">
         <caption className="sr-only">Temperature, humidity and water by month</caption>
         <thead>
