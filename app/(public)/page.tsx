@@ -5,7 +5,7 @@ import { getActor } from '@/lib/auth/session';
 import { figuresOf } from '@/lib/crops/reference-target';
 import type { ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
 import { referenceData } from '@/lib/reference-data/reference-data';
-import { defaultTariff } from '@/lib/tariffs/default-tariff';
+import { landingTariff } from '@/lib/tariffs/landing-tariff';
 import { LandingTent, type LandingCrop } from './_components/landing-tent';
 
 export const metadata: Metadata = { title: { absolute: 'Cellarsun: a tent in a cold cellar' } };
@@ -26,7 +26,7 @@ function landingDocument(crops: readonly LandingCrop[]): ScenarioDocument {
   return {
     ...demoDocument,
     tiers: demoDocument.tiers.map((tier) => ({ ...tier, target: known(tier.target?.crop) ?? tier.target })),
-    power: { ...demoDocument.power, tariff: defaultTariff('EUR', referenceData().prices).tariff },
+    power: { ...demoDocument.power, tariff: landingTariff() },
   };
 }
 

@@ -233,11 +233,13 @@ function Rows({
 function TotalsBar({ context }: { context: SectionContext }) {
   const bill = billOf(context);
   const cautions = context.evaluation?.cautions.length ?? 0;
+  const bar =
+    'sticky bottom-0 z-10 flex min-h-[58px] items-center justify-between border-t-[1.5px] border-ink bg-sheet px-4 py-1.5';
+  if (!bill) return <p className={`${bar} text-14 text-ink-soft`}>Being reckoned</p>;
   return (
-    <div className="sticky bottom-0 z-10 flex min-h-[58px] items-center justify-between border-t-[1.5px] border-ink bg-sheet px-4 py-1.5">
+    <div className={bar}>
       <p className="text-14 text-ink-soft">
-        <span className="text-22 font-semibold text-ink">{bill ? bill.kwh.toFixed(0) : '0'}</span> kWh{' '}
-        {bill ? `in ${MONTHS[bill.month - 1]}` : 'a month'}
+        <span className="text-22 font-semibold text-ink">{bill.kwh.toFixed(0)}</span> kWh in {MONTHS[bill.month - 1]}
       </p>
       <a href="#cautions" className="flex min-h-11 items-center gap-2 text-14 font-semibold">
         {cautions > 0 && <CautionSign />}

@@ -117,7 +117,8 @@ export function LedgerWords({
 
 export function LedgerKey({ context, row }: { context: SectionContext; row?: boolean }) {
   const bill = billOf(context);
-  if (!bill || bill.kwh <= 0)
+  if (!bill) return null;
+  if (bill.kwh <= 0)
     return <p className="text-12 text-ink-soft">Twelve months of light and heat, once there is a lamp.</p>;
   const lines = [
     { fill: 'bg-ember', name: 'heater, hatched', kwh: bill.heaterKwh },

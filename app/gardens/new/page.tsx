@@ -2,6 +2,7 @@ import type { Metadata, Route } from 'next';
 import { redirect } from 'next/navigation';
 import { PageFrame } from '@/app/_components/page-frame';
 import { getActor } from '@/lib/auth/session';
+import { landingTariff } from '@/lib/tariffs/landing-tariff';
 import { NewGardenForm } from './_components/new-garden-form';
 
 export const metadata: Metadata = { title: 'A new garden' };
@@ -9,8 +10,9 @@ export const metadata: Metadata = { title: 'A new garden' };
 export default async function NewGardenPage({ searchParams }: { searchParams: Promise<{ keep?: string }> }) {
   const { keep } = await searchParams;
   const actor = await getActor();
-  if (!actor) redirect('/sign-in?callbackUrl=/gardens/new' as Route);
   const keeping = keep === 'drawing';
+  const here = keeping ? '/gardens/new?keep=drawing' : '/gardens/new';
+  if (!actor) redirect(`/sign-in?callbackUrl=${encodeURIComponent(here)}` as Route);
   return (
     <PageFrame
       current="new"
@@ -18,7 +20,7 @@ export default async function NewGardenPage({ searchParams }: { searchParams: Pr
       headline={keeping ? 'Your drawing gets a garden to stand in.' : 'A garden of your own.'}
       lead="You are its owner. Nobody else sees it until you give them a code."
     >
-      <NewGardenForm keeping={keeping} units={actor.unitSystem} />
+      <NewGardenForm keeping={keeping ? { standIn: landingTariff() } : null} units={actor.unitSystem} />
     </PageFrame>
   );
 }

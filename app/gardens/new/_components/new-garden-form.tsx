@@ -9,12 +9,13 @@ import { dropDraft, useDraft } from '@/app/_components/draft';
 import { TextLink } from '@/app/_components/link';
 import { SelectField } from '@/app/_components/select-field';
 import { TextField } from '@/app/_components/text-field';
+import type { Tariff } from '@/lib/evaluation/evaluate-scenario';
 import { nameField } from '@/lib/gardens/garden.schema';
 import { currencies, currencySymbol } from '@/lib/format/money';
 import type { UnitSystem } from '@/lib/format/quantity';
 import { ApiError, apiSend } from '@/lib/http/api-client';
 import { useCreateGarden } from '@/lib/gardens/garden.hooks';
-import { keepDrawing } from './keep-drawing';
+import { keepDrawing, typedTariff } from './keep-drawing';
 
 const money = currencies.map((code) => ({
   value: code,
@@ -42,18 +43,33 @@ function currencyOfBrowser(): string {
   return known[region] ?? 'EUR';
 }
 
-export function NewGardenForm({ keeping, units: first }: { keeping: boolean; units: UnitSystem }) {
+interface NewGardenFormProps {
+  /** The price in a drawing that nobody typed; null where no drawing is to be kept. */
+  keeping: { standIn: Tariff } | null;
+  units: UnitSystem;
+}
+
+export function NewGardenForm({ keeping, units: first }: NewGardenFormProps) {
   const router = useRouter();
   const draft = useDraft();
+  const typed = keeping && draft ? typedTariff(draft, keeping.standIn) : null;
   const create = useCreateGarden();
   const [gardenId] = useState(() => crypto.randomUUID());
   const [name, setName] = useState('');
-  const [currency, setCurrency] = useState<string | null>(null);
+  const [chosen, setCurrency] = useState<string | null>(null);
   const [units, setUnits] = useState(first);
   const [nameProblem, setNameProblem] = useState<string>();
   const [problem, setProblem] = useState('');
   const [busy, setBusy] = useState(false);
   const field = useRef<HTMLInputElement>(null);
+  const ids = useRef(new Map<string, string>());
+  const idOf = (key: string) => {
+    const id = ids.current.get(key) ?? crypto.randomUUID();
+    ids.current.set(key, id);
+    return id;
+  };
+
+  const currency = chosen ?? typed?.currency ?? currencyOfBrowser();
 
   const submit = async (event: FormEvent) => {
     event.preventDefault();
@@ -63,11 +79,11 @@ export function NewGardenForm({ keeping, units: first }: { keeping: boolean; uni
     setBusy(true);
     setProblem('');
     try {
-      const chosen = currency ?? currencyOfBrowser();
       if (units !== first) await apiSend('PATCH', '/api/v1/account', { unitSystem: units });
-      const garden = await create.mutateAsync({ gardenId, name: read.data, currency: chosen });
+      const garden = await create.mutateAsync({ gardenId, name: read.data, currency });
       if (keeping && draft) {
-        const at = await keepDrawing(garden.gardenId, draft);
+        const tariff = typed?.currency === currency ? typed : null;
+        const at = await keepDrawing({ gardenId, draft, tariff, idOf });
         dropDraft();
         router.push(at as Route);
       } else {
@@ -98,10 +114,14 @@ export function NewGardenForm({ keeping, units: first }: { keeping: boolean; uni
       />
       <SelectField
         label="Money"
-        value={currency ?? currencyOfBrowser()}
+        value={currency}
         options={money}
         onChange={setCurrency}
-        hint="Prices and bills of this garden are in it. An owner can change it later; amounts are not converted."
+        hint={
+          typed && typed.currency !== currency
+            ? `The price in your drawing is in ${typed.currency} and stays behind; type yours in the room.`
+            : 'Prices and bills of this garden are in it. An owner can change it later; amounts are not converted.'
+        }
       />
       <Choice
         label="Units that you read"

@@ -39,7 +39,12 @@ export function AddCrop({ gardenId, onDone }: { gardenId: string; onDone: () => 
     }
   });
   return (
-    <form onSubmit={submit} noValidate className="flex flex-wrap items-start gap-4 border-t border-line py-4">
+    <form
+      method="post"
+      onSubmit={submit}
+      noValidate
+      className="flex flex-wrap items-start gap-4 border-t border-line py-4"
+    >
       <RhfTextField control={control} name="crop" label="Crop" autoFocus />
       <RhfTextField control={control} name="stage" label="Stage" className="w-40" />
       <RhfQuantityField control={control} name="aim" label="Light in a day, the aim" kind="dli" className="w-40" />

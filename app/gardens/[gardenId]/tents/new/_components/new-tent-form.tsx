@@ -59,6 +59,7 @@ export function NewTentForm({ gardenId, rooms, wanted }: NewTentFormProps) {
   };
   return (
     <form
+      method="post"
       noValidate
       onSubmit={(event) => void submit(event)}
       className="grid grid-cols-[214px_minmax(0,1fr)] gap-x-20 gap-y-8 pt-8 max-lg:grid-cols-1"

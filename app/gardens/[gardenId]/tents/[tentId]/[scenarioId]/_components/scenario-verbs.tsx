@@ -142,6 +142,7 @@ function RenameField({ name, onDone }: { name: string; onDone: (name: string) =>
   const wrong = typed.trim() === '' ? 'Type a name.' : typed.length > 80 ? 'Use at most 80 letters.' : undefined;
   return (
     <form
+      method="post"
       className="flex items-end gap-3"
       onSubmit={(event) => {
         event.preventDefault();

@@ -110,7 +110,8 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
   const units = useUnits();
   const temp = (value: number) => formatQuantity(value, 'temperature', units).figure;
   const unit = formatQuantity(0, 'temperature', units).unit;
-  const plain = (value: number, digits = 0) => value.toFixed(digits);
+  const plain = (value: number) => value.toFixed(0);
+  const span = (low: string, high: string) => (low === high ? low : `${low} to ${high}`);
   return (
     <div
       className="relative overflow-x-auto pt-4"
@@ -151,7 +152,7 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
                 temp(month.airTempC.min),
                 temp(month.airTempC.mean),
                 temp(month.airTempC.max),
-                `${plain(month.relHumidityPct.min)} to ${plain(month.relHumidityPct.max)}`,
+                span(plain(month.relHumidityPct.min), plain(month.relHumidityPct.max)),
                 plain(month.unmetHeatKh),
                 plain(month.overheatKh),
                 plain(month.condensationH),
