@@ -11,6 +11,10 @@ const ways = [
 async function signUp(page: Page, hand: Hand) {
   await page.goto('/sign-up');
   await isAccessible(page, 'sign-up');
+  await fillSignUp(page, hand);
+}
+
+async function fillSignUp(page: Page, hand: Hand) {
   await hand.fill(page.getByLabel('Name that others see'), 'Ines');
   await hand.fill(page.getByLabel('E-mail'), `ines-${crypto.randomUUID()}@tests.example`);
   await hand.fill(page.getByLabel('Passphrase', { exact: true }), 'slow green kettle on the sill');
@@ -59,6 +63,17 @@ async function addTent(page: Page, hand: Hand, garden: string) {
   await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
 }
 
+/** Hangs the copy's lamp lower: its figure follows, and it is kept without a word. */
+async function lowerLamp(page: Page, hand: Hand) {
+  const lamp = page.getByRole('slider', { name: /height above the leaves/ }).first();
+  const before = Number(await lamp.getAttribute('aria-valuenow'));
+  await hand.lower(lamp);
+  await expect.poll(async () => Number(await lamp.getAttribute('aria-valuenow'))).toBeLessThan(before);
+  await expect(page.getByRole('status').filter({ hasText: 'Saved' })).toBeVisible();
+  await page.reload();
+  await expect.poll(async () => Number(await lamp.getAttribute('aria-valuenow'))).toBeLessThan(before);
+}
+
 for (const { name, colorScheme, width, height, keys } of ways) {
   test.describe(name, () => {
     test.use({ colorScheme, viewport: { width, height } });
@@ -87,10 +102,13 @@ for (const { name, colorScheme, width, height, keys } of ways) {
       const first = page.url();
       await hand.press(page.getByRole('button', { name: 'Try another' }).first());
       await page.waitForURL((url) => url.href !== first);
+      await lowerLamp(page, hand);
 
       await page.goto(`${garden}/compare`);
       await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
       await expect(page.getByRole('checkbox')).toHaveCount(2);
+      // The lamp hung lower and nothing else: a tier's light differs, with its sign.
+      await expect(page.getByRole('row', { name: /^Light/ })).toContainText(/[+−]\d+\.\d/);
       await isAccessible(page, 'compare');
 
       await page.goto('/sign-out');
@@ -102,3 +120,26 @@ for (const { name, colorScheme, width, height, keys } of ways) {
     });
   });
 }
+
+test('a stranger’s drawing is kept as it was, with the price typed into it', async ({ page }) => {
+  test.setTimeout(90_000);
+  await page.goto('/');
+  const lamp = page.getByRole('slider', { name: /height above the leaves/ }).first();
+  const before = Number(await lamp.getAttribute('aria-valuenow'));
+  await mouse.lower(lamp);
+  await expect.poll(async () => Number(await lamp.getAttribute('aria-valuenow'))).toBeLessThan(before);
+  const drawn = await lamp.getAttribute('aria-valuenow');
+  await mouse.fill(page.getByLabel('A kWh costs'), '0.37');
+  await page.keyboard.press('Enter');
+  await page.getByRole('link', { name: 'Keep this tent' }).click();
+  await page.waitForURL(/sign-up/);
+  await fillSignUp(page, mouse);
+  await page.waitForURL(/keep=drawing/);
+  await mouse.fill(page.getByLabel('Name of the garden'), 'Under the stairs');
+  await page.getByRole('button', { name: 'Make the garden and keep the drawing' }).click();
+  await page.waitForURL(/\/tents\/[0-9a-f-]{36}\/[0-9a-f-]{36}/);
+  await expect(lamp).toHaveAttribute('aria-valuenow', drawn!);
+  await expect(page.getByRole('link', { name: /As I drew it/ })).toHaveCount(1);
+  await expect(page.getByText('First layout')).toHaveCount(0);
+  await expect(page.getByText('€ 0.37 a kWh').first()).toBeVisible();
+});
