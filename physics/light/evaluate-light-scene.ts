@@ -1,15 +1,15 @@
 import { requireWithin } from '../domain-error';
 import { faceShare, unitPpfd } from './direct';
-import type { Emitter } from './emitter';
-import type { LightResult, LightScene, PlaneResult, ScenePlane, Vec3 } from './light-documents';
+import type { LightResult, LightScene, PlaneResult, SceneFixture, ScenePlane, Vec3 } from './light-documents';
 import { prepareScene } from './scene-geometry';
 import { firstBounce } from './first-bounce';
 import { absorbedInZones, createZoneModel, seenOfLevel, solveZones, zoneAt } from './zones';
 
 const UP: Vec3 = [0, 0, 1];
 
-function behindFace({ id, distribution, face }: Emitter): string[] {
-  const beyond = face && distribution.type === 'table' && distribution.gammaDeg.some((gamma) => gamma > 90);
+/** Says of a lit face whose table reaches behind it that those photons are lost. */
+export function behindFace({ id, shape, distribution }: Pick<SceneFixture, 'id' | 'shape' | 'distribution'>): string[] {
+  const beyond = shape === 'rect' && distribution.type === 'table' && distribution.gammaDeg.some((gamma) => gamma > 90);
   return beyond
     ? [
         `The table of lamp ${id} reaches beyond 90°; a face shines to one side only, so those photons are lost in its body.`,
@@ -95,7 +95,7 @@ export function evaluateLightScene(scene: LightScene): LightResult {
     schema: 'light-result/1',
     planes,
     energyBalance: { emittedUmolS, absorbedUmolS },
-    warnings: [...(hazy ? [REFLECTED_IS_AN_ESTIMATE] : []), ...emitters.flatMap(behindFace)],
+    warnings: [...(hazy ? [REFLECTED_IS_AN_ESTIMATE] : []), ...scene.fixtures.flatMap(behindFace)],
     elapsedMs: 0,
   };
 }

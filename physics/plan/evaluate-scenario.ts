@@ -2,7 +2,7 @@ import { designStates } from '../heat/design-states';
 import { boxOf } from '../heat/tent-model';
 import { COLDEST_C, HOTTEST_C } from '../heat/settled-state';
 import { FABRIC_CAPACITY_J_K, heaterCycles } from '../heat/thermostat';
-import { REFLECTED_IS_AN_ESTIMATE } from '../light/evaluate-light-scene';
+import { behindFace, REFLECTED_IS_AN_ESTIMATE } from '../light/evaluate-light-scene';
 import type { LightCache } from '../light/light-field';
 import { solveTierLight, type TierLight } from '../light/tier-light';
 import { roomYear, type RoomYear } from '../room/room-year';
@@ -146,6 +146,8 @@ function warningsOf(scenario: ResolvedScenario, { heat, year, room, withYear }: 
   const { reflectance } = scenario.tent;
   if (scenario.placements.length > 0 && Object.values(reflectance).some((value) => value > 0))
     warnings.push(REFLECTED_IS_AN_ESTIMATE);
+  const placed = new Set(scenario.placements.map((placement) => placement.fixture));
+  warnings.push(...scenario.fixtures.filter((fixture) => placed.has(fixture.id)).flatMap(behindFace));
   if (withYear)
     warnings.push(
       'The year is a steady balance of each hour; what the tent stores from one hour to the next is left out.',

@@ -56,6 +56,14 @@ describe('a tier’s day', () => {
     expect(tiersOf(doc)[0]!.strayPpfdUmolM2S).toBeCloseTo(lower!.byPlacement[1]!.meanPpfdUmolM2S, 12);
   });
 
+  it('is short of what a lamp’s table sends behind its face, and the evaluation says so once for the lamp', () => {
+    const doc = rackScenario({ lamps: 2, tiers: 2 });
+    const beyond = () => evaluateScenario(doc, { year: false }).warnings.filter((text) => text.includes('beyond 90°'));
+    expect(beyond()).toEqual([]);
+    for (const fixture of doc.fixtures) fixture.distribution = { type: 'table', gammaDeg: [0, 120], intensity: [1, 1] };
+    expect(beyond()).toHaveLength(new Set(doc.placements.map((placement) => placement.fixture)).size);
+  });
+
   it('without a lamp has no light, no day, and darkness that is dark', () => {
     const doc = rackScenario({ lamps: 2, tiers: 2 });
     doc.placements = [];
