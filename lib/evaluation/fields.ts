@@ -13,9 +13,25 @@ export function expectationOf(message: string): Expectation | undefined {
   return expectations.get(message);
 }
 
-function expecting(message: string, expectation: Expectation): string {
+/** Ties a fixed message to what it asks for. What depends on other fields carries it along: see `misfit`. */
+export function expecting(message: string, expectation: Expectation): string {
   expectations.set(message, expectation);
   return message;
+}
+
+/** What does not go together with another field: where, in words, and what would. */
+export interface Misfit extends Expectation {
+  path: PropertyKey[];
+  message: string;
+}
+
+export const misfit = ({ path, message, range, unit }: Misfit) =>
+  ({ code: 'custom', path, message, params: { range, unit } }) as const;
+
+/** What an issue asks for, whichever way it carries it. */
+export function expectationOfIssue(issue: z.core.$ZodIssue): Expectation | undefined {
+  const { range, unit } = (issue.code === 'custom' && issue.params) || {};
+  return typeof range === 'string' ? { range, unit: String(unit) } : expectationOf(issue.message);
 }
 
 interface QuantityOptions {

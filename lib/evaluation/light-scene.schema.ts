@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import type { LightScene } from '@/physics/light/light-documents';
-import { idField, list, quantity, words } from './fields';
+import { expecting, idField, list, misfit, quantity, words, type Misfit } from './fields';
 import {
-  axisProblem,
+  axisProblems,
   coordinate,
   direction,
   distributionSchema,
@@ -67,7 +67,9 @@ const planeSchema = z.strictObject({
 });
 
 const sceneShape = z.strictObject({
-  schema: z.literal('light-scene/1', { error: 'Give the schema light-scene/1.' }),
+  schema: z.literal('light-scene/1', {
+    error: expecting('Give the schema light-scene/1.', { range: 'light-scene/1', unit: '' }),
+  }),
   id: words({ most: 200 }).optional(),
   title: z.unknown().optional(),
   covers: z.unknown().optional(),
@@ -81,59 +83,101 @@ const sceneShape = z.strictObject({
 
 const TOUCH = 1e-9;
 
-/** Within the tent, edges included. */
+/** Beyond a tent's side, edges included. A side that is no length is wrong itself, and that is told once, where it stands. */
 export function outside(value: number, most: number): boolean {
-  return value < -TOUCH || value > most + TOUCH;
+  return most > 0 && (value < -TOUCH || value > most + TOUCH);
 }
 
+export const insideTent = (path: PropertyKey[], most: number): Misfit => ({
+  path,
+  message: `Stay within the tent: 0 to ${most} m.`,
+  range: `0 to ${most}`,
+  unit: 'm',
+});
+
+export const usedTwice = (path: PropertyKey[]): Misfit => ({
+  path,
+  message: 'This id is used twice.',
+  range: 'an id of its own',
+  unit: '',
+});
+
 export const lightSceneSchema: z.ZodType<LightScene> = sceneShape.superRefine((scene, context) => {
-  const say = (path: PropertyKey[], message: string) => context.addIssue({ code: 'custom', path, message });
+  const say = (problem: Misfit) => context.addIssue(misfit(problem));
   const { width, depth, height } = scene.tent;
-  const within = (path: PropertyKey[], extent: { x0: number; x1: number; y0: number; y1: number }, flat: boolean) => {
-    if (flat ? extent.x1 <= extent.x0 : extent.x1 < extent.x0) say([...path, 'x1'], 'x1 must be greater than x0.');
-    if (flat ? extent.y1 <= extent.y0 : extent.y1 < extent.y0) say([...path, 'y1'], 'y1 must be greater than y0.');
-    for (const key of ['x0', 'x1'] as const)
-      if (outside(extent[key], width)) say([...path, key], `Stay within the tent: 0 to ${width} m.`);
-    for (const key of ['y0', 'y1'] as const)
-      if (outside(extent[key], depth)) say([...path, key], `Stay within the tent: 0 to ${depth} m.`);
+  const within = (path: PropertyKey[], extent: { x0: number; x1: number; y0: number; y1: number }) => {
+    const sides = [
+      ['x0', 'x1', width],
+      ['y0', 'y1', depth],
+    ] as const;
+    for (const [from, to, most] of sides) {
+      if (extent[to] <= extent[from])
+        say({
+          path: [...path, to],
+          message: `${to} must be greater than ${from}.`,
+          range: `more than ${extent[from]}, to ${most}`,
+          unit: 'm',
+        });
+      for (const key of [from, to]) if (outside(extent[key], most)) say(insideTent([...path, key], most));
+    }
   };
   scene.slabs.forEach((slab, index) => {
-    within(['slabs', index], slab, true);
-    if (outside(slab.zTop, height)) say(['slabs', index, 'zTop'], `Stay within the tent: 0 to ${height} m.`);
+    within(['slabs', index], slab);
+    if (outside(slab.zTop, height)) say(insideTent(['slabs', index, 'zTop'], height));
     if (slab.openFraction === 0 && slab.thickness > slab.zTop + TOUCH)
-      say(['slabs', index, 'thickness'], 'The slab would reach below the floor.');
+      say({
+        path: ['slabs', index, 'thickness'],
+        message: 'The slab would reach below the floor.',
+        range: `0 to ${slab.zTop}`,
+        unit: 'm',
+      });
   });
   scene.boxes.forEach((box, index) => {
     const most = [width, depth, height];
-    box.min.forEach((value, axis) => {
-      if (box.max[axis]! < value) say(['boxes', index, 'max'], 'Every figure of max must be at least that of min.');
-      if (outside(value, most[axis]!) || outside(box.max[axis]!, most[axis]!))
-        say(['boxes', index], 'The box must lie within the tent.');
-    });
+    if (box.min.some((value, axis) => box.max[axis]! < value))
+      say({
+        path: ['boxes', index, 'max'],
+        message: 'Every figure of max must be at least that of min.',
+        range: `from ${box.min.join(' ')}`,
+        unit: 'm',
+      });
+    if (most.some((side, axis) => outside(box.min[axis]!, side) || outside(box.max[axis]!, side)))
+      say({
+        path: ['boxes', index],
+        message: 'The box must lie within the tent.',
+        range: `0 0 0 to ${most.join(' ')}`,
+        unit: 'm',
+      });
   });
   scene.fixtures.forEach((fixture, index) => {
     const path = ['fixtures', index];
     [width, depth, height].forEach((most, axis) => {
-      if (outside(fixture.position[axis]!, most))
-        say([...path, 'position', axis], `Stay within the tent: 0 to ${most} m.`);
+      if (outside(fixture.position[axis]!, most)) say(insideTent([...path, 'position', axis], most));
     });
-    const parallel = axisProblem(fixture.aim, fixture.axis);
-    if (parallel) say([...path, 'axis'], parallel);
-    for (const problem of emitterProblems(
-      { ...fixture, length: fixture.length, width: fixture.width },
-      { length: 'length', width: 'width' },
-    ))
-      say([...path, problem.path], problem.message);
+    for (const problem of [
+      ...axisProblems(fixture),
+      ...emitterProblems(
+        { ...fixture, length: fixture.length, width: fixture.width },
+        { length: 'length', width: 'width' },
+      ),
+    ])
+      say({ ...problem, path: [...path, ...problem.path] });
   });
   let sensors = 0;
   scene.planes.forEach((plane, index) => {
-    within(['planes', index], plane, true);
-    if (outside(plane.z, height)) say(['planes', index, 'z'], `Stay within the tent: 0 to ${height} m.`);
+    within(['planes', index], plane);
+    if (outside(plane.z, height)) say(insideTent(['planes', index, 'z'], height));
     sensors += plane.nx * plane.ny;
   });
-  if (sensors > MOST_SENSORS) say(['planes'], `At most ${MOST_SENSORS} sensor cells in all; these are ${sensors}.`);
+  if (sensors > MOST_SENSORS)
+    say({
+      path: ['planes'],
+      message: `At most ${MOST_SENSORS} sensor cells in all; these are ${sensors}.`,
+      range: `0 to ${MOST_SENSORS}`,
+      unit: 'cells',
+    });
   for (const key of ['slabs', 'boxes', 'fixtures', 'planes'] as const)
-    repeated(scene[key]).forEach((index) => say([key, index, 'id'], 'This id is used twice.'));
+    repeated(scene[key]).forEach((index) => say(usedTwice([key, index, 'id'])));
 });
 
 /** The places of ids that an earlier entry has already. */

@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { LightScene } from '@/physics/light/light-documents';
 import type { ScenarioDocument } from '@/physics/plan/scenario-document';
-import { expectationOf } from './fields';
+import { expectationOf, expectationOfIssue } from './fields';
 import { lightSceneSchema } from './light-scene.schema';
 import { scenarioSchema } from './scenario.schema';
 
@@ -43,6 +43,22 @@ function brief(value: unknown): unknown {
 
 type Issue = z.core.$ZodIssue;
 
+const KINDS = new Map([
+  ['object', 'an object'],
+  ['record', 'an object'],
+  ['array', 'a list'],
+  ['tuple', 'a list'],
+  ['string', 'a text'],
+  ['number', 'a number'],
+  ['boolean', 'true or false'],
+]);
+const UNKNOWN_KEY = 'no such key';
+const UNSAID = 'see message';
+
+/** Where the field itself says nothing of what it takes. */
+export const isUnsaid = (range: string): boolean =>
+  range === UNKNOWN_KEY || range === UNSAID || [...KINDS.values()].includes(range);
+
 /** A union's own issue says only that nothing fitted; the branch that came furthest says why. */
 function innermost(issue: Issue): Issue[] {
   if (issue.code !== 'invalid_union' || !issue.errors || issue.errors.length === 0) return [issue];
@@ -61,26 +77,28 @@ function problemOf(issue: Issue, input: unknown): DocumentProblem[] {
     return issue.keys.map((key) => ({
       path: pathText([...issue.path, key]),
       value: brief(valueAt(input, [...issue.path, key])),
-      range: 'no such key',
+      range: UNKNOWN_KEY,
       unit: '',
       message: 'This key is not known here. Take it out or correct its name.',
     }));
   }
-  const expected = expectationOf(issue.message);
-  const missing = issue.code === 'invalid_type' && valueAt(input, issue.path) === undefined;
-  return [
-    {
-      path: pathText(issue.path),
-      value: brief(valueAt(input, issue.path)),
-      range: expected?.range ?? (missing ? 'must be there' : 'see message'),
-      unit: expected?.unit ?? '',
-      message: !issue.message.startsWith('Invalid input')
-        ? issue.message
-        : missing
-          ? 'This is missing.'
-          : 'This has the wrong form or is missing.',
-    },
-  ];
+  const value = valueAt(input, issue.path);
+  const kind = issue.code === 'invalid_type' ? KINDS.get(issue.expected) : undefined;
+  const wanted = kind ?? kindsOf(issue);
+  const { range, unit } = expectationOfIssue(issue) ?? { range: wanted ?? UNSAID, unit: '' };
+  return [{ path: pathText(issue.path), value: brief(value), range, unit, message: messageOf(issue, value, wanted) }];
+}
+
+/** The kinds that a union tells its branches by, where none was met. */
+function kindsOf(issue: Issue): string | undefined {
+  const options = issue.code === 'invalid_union' && 'options' in issue ? issue.options : undefined;
+  return Array.isArray(options) ? `one of: ${options.join(', ')}` : undefined;
+}
+
+/** The field's own words, or, where zod has only its own, what kind of thing belongs here. */
+function messageOf(issue: Issue, value: unknown, wanted: string | undefined): string {
+  if (!issue.message.startsWith('Invalid ')) return issue.message;
+  return `${value === undefined ? 'This is missing.' : 'This has the wrong form.'}${wanted ? ` Give ${wanted}.` : ''}`;
 }
 
 export function toProblems(error: z.ZodError, input: unknown): DocumentProblem[] {

@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import type { FaceReflectance, Vec3 } from '@/physics/light/light-documents';
-import { clockEnd, clockTime, currencyCode, flag, idField, list, oneOf, quantity, timeZone, words } from './fields';
+import { clockTime, expecting, flag, idField, list, misfit, oneOf, quantity, timeZone, words } from './fields';
 import {
-  axisProblem,
+  axisProblems,
   coordinate,
   direction,
   distributionSchema,
@@ -14,6 +14,7 @@ import {
   size,
   vec3,
 } from './geometry.schema';
+import { tariffSchema } from './tariff.schema';
 
 /** The parts of scenario/1, each used by the document, by the rows that it is made of, and by their forms. */
 const airTempC = () => quantity({ min: -40, max: 60, unit: '°C' });
@@ -39,7 +40,12 @@ export const seriesSchema = (value: () => z.ZodNumber, swing: () => z.ZodNumber)
       }),
       z.strictObject({ kind: z.literal('hourly'), values: list(value(), { least: 8760, most: 8784 }) }),
     ],
-    { error: 'Give a series of kind constant, monthly or hourly.' },
+    {
+      error: expecting('Give a series of kind constant, monthly or hourly.', {
+        range: 'kind constant, monthly or hourly',
+        unit: '',
+      }),
+    },
   );
 
 export const roomClimateSchema = z.strictObject({
@@ -58,7 +64,9 @@ export const roomClimateSchema = z.strictObject({
 export const portSchema = z.strictObject({
   kind: oneOf(['exhaust', 'intake', 'cable']),
   wall: oneOf(['xMin', 'xMax', 'yMin', 'yMax', 'ceiling']),
-  atM: z.tuple([coordinate(), coordinate()], { error: 'Give two numbers: across and up.' }),
+  atM: z.tuple([coordinate(), coordinate()], {
+    error: expecting('Give two numbers: across and up.', { range: 'two numbers', unit: 'm' }),
+  }),
   diameterM: quantity({ min: 0.01, max: 1, unit: 'm' }),
 });
 
@@ -158,7 +166,7 @@ export function checkEmitter(
     { ...fixture, length: fixture.lengthM, width: fixture.widthM },
     { length: 'lengthM', width: 'widthM' },
   );
-  for (const { path, message } of problems) context.addIssue({ code: 'custom', path: [path], message });
+  for (const problem of problems) context.addIssue(misfit(problem));
 }
 
 export const fixtureTypeSchema = z
@@ -177,9 +185,8 @@ export const placementSchema = z
     dimFrac: share().optional(),
     schedule: idField,
   })
-  .superRefine(({ aim, axis }, context) => {
-    const parallel = axisProblem(aim, axis);
-    if (parallel) context.addIssue({ code: 'custom', path: ['axis'], message: parallel });
+  .superRefine((placement, context) => {
+    for (const problem of axisProblems(placement)) context.addIssue(misfit(problem));
   });
 
 export const scheduleSchema = z.strictObject({ id: idField, onAt: clockTime, hours: hours() });
@@ -213,18 +220,24 @@ export const climateSchema = z
   .superRefine((climate, context) => {
     const warmest = Math.max(climate.dayTempC, climate.nightTempC);
     if (climate.maxTempC < warmest)
-      context.addIssue({
-        code: 'custom',
-        path: ['maxTempC'],
-        message: `The highest temperature must be at least the ${warmest} °C that is to be kept.`,
-      });
+      context.addIssue(
+        misfit({
+          path: ['maxTempC'],
+          message: `The highest temperature must be at least the ${warmest} °C that is to be kept.`,
+          range: `${warmest} to 80`,
+          unit: '°C',
+        }),
+      );
     const fan = climate.exhaust;
     if (fan && (fan.minAirflowM3H ?? 0) > fan.maxAirflowM3H)
-      context.addIssue({
-        code: 'custom',
-        path: ['exhaust', 'minAirflowM3H'],
-        message: `The least airflow must not exceed the most, ${fan.maxAirflowM3H} m³/h.`,
-      });
+      context.addIssue(
+        misfit({
+          path: ['exhaust', 'minAirflowM3H'],
+          message: `The least airflow must not exceed the most, ${fan.maxAirflowM3H} m³/h.`,
+          range: `0 to ${fan.maxAirflowM3H}`,
+          unit: 'm³/h',
+        }),
+      );
   });
 
 const kgPerHour = () => quantity({ min: 0, max: 100, unit: 'kg/h' });
@@ -249,11 +262,14 @@ export const waterSchema = z
   })
   .superRefine(({ flood }, context) => {
     if (flood && flood.minutes > flood.everyMinutes)
-      context.addIssue({
-        code: 'custom',
-        path: ['flood', 'minutes'],
-        message: `A flood cannot last longer than its ${flood.everyMinutes} minutes.`,
-      });
+      context.addIssue(
+        misfit({
+          path: ['flood', 'minutes'],
+          message: `A flood cannot last longer than its ${flood.everyMinutes} minutes.`,
+          range: `0 to ${flood.everyMinutes}`,
+          unit: 'min',
+        }),
+      );
   });
 
 export const circuitSchema = z.strictObject({
@@ -262,64 +278,6 @@ export const circuitSchema = z.strictObject({
   otherLoadsW: quantity({ min: 0, max: 50_000, unit: 'W' }).optional(),
   carries: list(idField, { most: 80 }),
 });
-
-const price = () => quantity({ min: -10, max: 1000, unit: 'a kWh' });
-const tariffCommon = {
-  currency: currencyCode,
-  fixedPerMonth: quantity({ min: 0, max: 1e6, unit: 'a month' }).optional(),
-  taxPct: percent().optional(),
-  householdBaseKwhPerMonth: quantity({ min: 0, max: 1e6, unit: 'kWh' }).optional(),
-};
-
-export const tariffPeriodSchema = z.strictObject({
-  price: price(),
-  weekdays: oneOf(['all', 'weekday', 'weekend']).optional(),
-  from: clockTime,
-  to: clockEnd,
-  months: list(quantity({ min: 1, max: 12, unit: '', integer: true }), { least: 1, most: 12 }).optional(),
-});
-
-export const tariffSchema = z.discriminatedUnion(
-  'kind',
-  [
-    z.strictObject({ ...tariffCommon, kind: z.literal('flat'), pricePerKwh: price() }),
-    z.strictObject({
-      ...tariffCommon,
-      kind: z.literal('timeOfUse'),
-      periods: list(tariffPeriodSchema, { most: 48 }),
-      otherwise: price(),
-    }),
-    z
-      .strictObject({
-        ...tariffCommon,
-        kind: z.literal('tiered'),
-        tiers: list(
-          z.strictObject({ upToKwh: quantity({ min: 0, max: 1e6, unit: 'kWh' }).optional(), price: price() }),
-          { least: 1, most: 12 },
-        ),
-        prorateByDays: flag().optional(),
-      })
-      .superRefine(({ tiers }, context) => {
-        tiers.forEach((tier, index) => {
-          const last = index === tiers.length - 1;
-          const before = tiers[index - 1]?.upToKwh ?? 0;
-          if (last && tier.upToKwh !== undefined)
-            context.addIssue({
-              code: 'custom',
-              path: ['tiers', index, 'upToKwh'],
-              message: 'The last step has no end: leave upToKwh out.',
-            });
-          if (!last && (tier.upToKwh === undefined || tier.upToKwh <= before))
-            context.addIssue({
-              code: 'custom',
-              path: ['tiers', index, 'upToKwh'],
-              message: `This step must end above ${before} kWh.`,
-            });
-        });
-      }),
-  ],
-  { error: 'Give a tariff of kind flat, timeOfUse or tiered.' },
-);
 
 export const supplyVoltage = () => quantity({ min: 90, max: 420, unit: 'V' });
 export const co2Field = () => quantity({ min: 0, max: 3000, unit: 'g/kWh' });
@@ -334,15 +292,22 @@ export const powerSchema = z.strictObject({
 export const calendarSchema = z.strictObject({ year: quantity({ min: 1900, max: 2200, unit: '', integer: true }) });
 
 const bound = () => quantity({ min: -1e6, max: 1e6, unit: '' });
-const pathMessage = 'Name the uncertain figure by its path, such as tent.fabricUWM2K.';
+const pathMessage = expecting('Name the uncertain figure by its path, such as tent.fabricUWM2K.', {
+  range: '1 to 120 of a-z A-Z 0-9 . _ -',
+  unit: '',
+});
 export const rangeSchema = z
   .record(
     z.string().regex(/^[A-Za-z0-9_.\-]{1,120}$/, { error: pathMessage }),
-    z.tuple([bound(), bound()], { error: 'Give two numbers: low and high.' }),
+    z.tuple([bound(), bound()], {
+      error: expecting('Give two numbers: low and high.', { range: 'two numbers', unit: '' }),
+    }),
   )
   .refine((ranges) => Object.values(ranges).every(([low, high]) => low <= high), {
-    error: 'The low end must not exceed the high one.',
+    error: expecting('The low end must not exceed the high one.', { range: 'low to high', unit: '' }),
   })
-  .refine((ranges) => Object.keys(ranges).length <= 64, { error: 'At most 64 ranges.' });
+  .refine((ranges) => Object.keys(ranges).length <= 64, {
+    error: expecting('At most 64 ranges.', { range: '0 to 64', unit: 'entries' }),
+  });
 
 export const appSchema = z.record(z.string(), z.unknown());

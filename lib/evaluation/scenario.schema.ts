@@ -1,7 +1,16 @@
 import { z } from 'zod';
 import type { ScenarioDocument } from '@/physics/plan/scenario-document';
-import { list, words } from './fields';
-import { MOST_BOXES, MOST_FIXTURES, MOST_SENSORS, MOST_SLABS, outside, repeated } from './light-scene.schema';
+import { expecting, list, misfit, words, type Misfit } from './fields';
+import {
+  insideTent,
+  MOST_BOXES,
+  MOST_FIXTURES,
+  MOST_SENSORS,
+  MOST_SLABS,
+  outside,
+  repeated,
+  usedTwice,
+} from './light-scene.schema';
 import {
   appSchema,
   boxSchema,
@@ -20,7 +29,9 @@ import {
 } from './scenario-fields';
 
 const scenarioShape = z.strictObject({
-  schema: z.literal('scenario/1', { error: 'Give the schema scenario/1.' }),
+  schema: z.literal('scenario/1', {
+    error: expecting('Give the schema scenario/1.', { range: 'scenario/1', unit: '' }),
+  }),
   name: words({ most: 200 }),
   calendar: calendarSchema.optional(),
   place: placeSchema,
@@ -38,7 +49,7 @@ const scenarioShape = z.strictObject({
   app: appSchema.optional(),
 });
 
-type Say = (path: PropertyKey[], message: string) => void;
+type Say = (problem: Misfit) => void;
 type Rack = Pick<ScenarioDocument, 'tent' | 'tiers' | 'placements' | 'schedules' | 'boxes'>;
 
 /** Sensor cells are at most this wide; see physics/light/tier-light.ts. */
@@ -53,24 +64,36 @@ export function checkRack(rack: Rack, fixtureIds: ReadonlySet<string>, say: Say)
     const bad = box.min.some(
       (value, axis) => box.max[axis]! < value || outside(value, most[axis]!) || outside(box.max[axis]!, most[axis]!),
     );
-    if (bad) say(['boxes', index], 'The box must lie within the tent, with each figure of max at least that of min.');
+    if (bad)
+      say({
+        path: ['boxes', index],
+        message: 'The box must lie within the tent, with each figure of max at least that of min.',
+        range: `0 0 0 to ${most.join(' ')}`,
+        unit: 'm',
+      });
   });
   const tierIds = new Set(rack.tiers.map((tier) => tier.id));
   const scheduleIds = new Set(rack.schedules.map((schedule) => schedule.id));
   rack.placements.forEach((placement, index) => {
     const path = ['placements', index];
     [widthM, depthM, heightM].forEach((most, axis) => {
-      if (outside(placement.positionM[axis]!, most))
-        say([...path, 'positionM', axis], `Stay within the tent: 0 to ${most} m.`);
+      if (outside(placement.positionM[axis]!, most)) say(insideTent([...path, 'positionM', axis], most));
     });
-    if (!fixtureIds.has(placement.fixture)) say([...path, 'fixture'], 'There is no fixture of this id.');
-    if (placement.tier && !tierIds.has(placement.tier)) say([...path, 'tier'], 'There is no tier of this id.');
-    if (!scheduleIds.has(placement.schedule)) say([...path, 'schedule'], 'There is no schedule of this id.');
+    if (!fixtureIds.has(placement.fixture)) say(unknownId([...path, 'fixture'], 'fixture'));
+    if (placement.tier && !tierIds.has(placement.tier)) say(unknownId([...path, 'tier'], 'tier'));
+    if (!scheduleIds.has(placement.schedule)) say(unknownId([...path, 'schedule'], 'schedule'));
   });
   for (const key of ['tiers', 'placements', 'schedules'] as const)
-    repeated(rack[key]).forEach((index) => say([key, index, 'id'], 'This id is used twice.'));
-  if (rack.boxes) repeated(rack.boxes).forEach((index) => say(['boxes', index, 'id'], 'This id is used twice.'));
+    repeated(rack[key]).forEach((index) => say(usedTwice([key, index, 'id'])));
+  if (rack.boxes) repeated(rack.boxes).forEach((index) => say(usedTwice(['boxes', index, 'id'])));
 }
+
+const unknownId = (path: PropertyKey[], what: string): Misfit => ({
+  path,
+  message: `There is no ${what} of this id.`,
+  range: `the id of a ${what}`,
+  unit: '',
+});
 
 function checkTiers({ tent, tiers }: Rack, say: Say): void {
   let sensors = 0;
@@ -81,21 +104,43 @@ function checkTiers({ tent, tiers }: Rack, say: Say): void {
       ['y0M', 'y1M', tent.depthM],
     ] as const;
     for (const [from, to, most] of extents) {
-      if (tier[to] - tier[from] < 0.01) say([...path, to], `${to} must be at least 1 cm more than ${from}.`);
-      for (const key of [from, to])
-        if (outside(tier[key], most)) say([...path, key], `Stay within the tent: 0 to ${most} m.`);
+      if (tier[to] - tier[from] < 0.01)
+        say({
+          path: [...path, to],
+          message: `${to} must be at least 1 cm more than ${from}.`,
+          range: `${metres(tier[from] + 0.01)} to ${most}`,
+          unit: 'm',
+        });
+      for (const key of [from, to]) if (outside(tier[key], most)) say(insideTent([...path, key], most));
     }
-    if (outside(tier.topHeightM, tent.heightM))
-      say([...path, 'topHeightM'], `Stay within the tent: 0 to ${tent.heightM} m.`);
+    if (outside(tier.topHeightM, tent.heightM)) say(insideTent([...path, 'topHeightM'], tent.heightM));
     if ((tier.thicknessM ?? 0) > tier.topHeightM + 1e-9)
-      say([...path, 'thicknessM'], 'The tier would reach below the floor.');
+      say({
+        path: [...path, 'thicknessM'],
+        message: 'The tier would reach below the floor.',
+        range: `0 to ${tier.topHeightM}`,
+        unit: 'm',
+      });
     if (outside(tier.topHeightM + (tier.canopyHeightM ?? 0), tent.heightM))
-      say([...path, 'canopyHeightM'], 'The leaves would stand above the tent.');
+      say({
+        path: [...path, 'canopyHeightM'],
+        message: 'The leaves would stand above the tent.',
+        range: `0 to ${metres(Math.max(0, tent.heightM - tier.topHeightM))}`,
+        unit: 'm',
+      });
     sensors += Math.ceil((tier.x1M - tier.x0M) / CELL_M) * Math.ceil((tier.y1M - tier.y0M) / CELL_M);
   });
   if (sensors > MOST_SENSORS)
-    say(['tiers'], `These tiers need ${sensors} sensor cells; at most ${MOST_SENSORS} are reckoned.`);
+    say({
+      path: ['tiers'],
+      message: `These tiers need ${sensors} sensor cells; at most ${MOST_SENSORS} are reckoned.`,
+      range: `0 to ${MOST_SENSORS}`,
+      unit: 'cells',
+    });
 }
+
+/** To the millimetre, as it is printed. */
+const metres = (value: number) => Math.round(value * 1000) / 1000;
 
 function checkHours(document: ScenarioDocument, say: Say): void {
   const year = document.calendar?.year ?? 2026;
@@ -104,36 +149,38 @@ function checkHours(document: ScenarioDocument, say: Say): void {
   for (const key of ['airTempC', 'relHumidityPct'] as const) {
     const series = document.room[key];
     if (series?.kind === 'hourly' && series.values.length !== wanted)
-      say(['room', key, 'values'], `The year ${year} has ${wanted} hours; these are ${series.values.length}.`);
+      say({
+        path: ['room', key, 'values'],
+        message: `The year ${year} has ${wanted} hours; these are ${series.values.length}.`,
+        range: String(wanted),
+        unit: 'entries',
+      });
   }
 }
 
+const LOAD_KINDS = ['light', 'heater', 'exhaust', 'circulation', 'pump'];
+
 function checkCircuits({ power, placements }: ScenarioDocument, say: Say): void {
-  const known = new Set([
-    'light',
-    'heater',
-    'exhaust',
-    'circulation',
-    'pump',
-    ...placements.map((placement) => placement.id),
-  ]);
+  const known = new Set([...LOAD_KINDS, ...placements.map((placement) => placement.id)]);
   const carried = new Set<string>();
-  repeated(power.circuits).forEach((index) => say(['power', 'circuits', index, 'id'], 'This id is used twice.'));
+  repeated(power.circuits).forEach((index) => say(usedTwice(['power', 'circuits', index, 'id'])));
   power.circuits.forEach((circuit, index) =>
     circuit.carries.forEach((load, at) => {
       const path = ['power', 'circuits', index, 'carries', at];
+      const range = `${LOAD_KINDS.join(', ')} or the id of a placement, each on one circuit`;
       if (!known.has(load))
-        say(path, 'Name a kind of load (light, heater, exhaust, circulation, pump) or a placement.');
-      else if (carried.has(load)) say(path, 'This load hangs on another circuit already.');
+        say({ path, message: `Name a kind of load (${LOAD_KINDS.join(', ')}) or a placement.`, range, unit: '' });
+      else if (carried.has(load))
+        say({ path, message: 'This load hangs on another circuit already.', range, unit: '' });
       carried.add(load);
     }),
   );
 }
 
 export const scenarioSchema: z.ZodType<ScenarioDocument> = scenarioShape.superRefine((document, context) => {
-  const say: Say = (path, message) => context.addIssue({ code: 'custom', path, message });
+  const say: Say = (problem) => context.addIssue(misfit(problem));
   checkRack(document, new Set(document.fixtures.map((fixture) => fixture.id)), say);
-  repeated(document.fixtures).forEach((index) => say(['fixtures', index, 'id'], 'This id is used twice.'));
+  repeated(document.fixtures).forEach((index) => say(usedTwice(['fixtures', index, 'id'])));
   checkHours(document, say);
   checkCircuits(document, say);
 });

@@ -1,14 +1,11 @@
 import 'server-only';
 
 import type { z } from 'zod';
-import { toProblems } from '../evaluation/problems';
+import { isUnsaid, toProblems } from '../evaluation/problems';
 import { AppError, invalid, type Problem } from './app-error';
 import { parseJsonText } from './json-text';
 
 export const LARGEST_BODY_BYTES = 256 * 1024;
-
-/** What `toProblems` writes for a range where the field itself names none. */
-const UNSAID = new Set(['see message', 'must be there', 'no such key']);
 
 const tooLarge = () =>
   new AppError({
@@ -52,7 +49,7 @@ export function problemsOf(error: z.ZodError, input: unknown): Problem[] {
     .slice(0, 50)
     .map(({ path, message, value, range, unit }) =>
       // Only fields of a plan say a range. What stands in others, a passphrase among them, is not sent back.
-      UNSAID.has(range) ? { path, message } : { path, message, value, range, unit },
+      isUnsaid(range) ? { path, message } : { path, message, value, range, unit },
     );
 }
 

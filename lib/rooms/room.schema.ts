@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { idField, list, oneOf, quantity, words } from '../evaluation/fields';
-import { co2Field, placeSchema, roomClimateSchema, supplyVoltage, tariffSchema } from '../evaluation/scenario-fields';
+import { co2Field, placeSchema, roomClimateSchema, supplyVoltage } from '../evaluation/scenario-fields';
+import { tariffSchema } from '../evaluation/tariff.schema';
 import { gardenParams, nameField, newIdField, versionField } from '../gardens/garden.schema';
 
 export const roomCircuitSchema = z.strictObject({

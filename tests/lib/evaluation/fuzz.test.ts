@@ -35,7 +35,7 @@ describe('20,000 broken documents', () => {
           expect(evaluated.problems.length).toBeGreaterThan(0);
           for (const problem of evaluated.problems) {
             expect(typeof problem.path).toBe('string');
-            expect(problem.range).not.toBe('');
+            expect(['', 'see message']).not.toContain(problem.range);
             expect(problem.message.length).toBeGreaterThan(5);
             expect(problem).toHaveProperty('value');
             expect(problem).toHaveProperty('unit');
