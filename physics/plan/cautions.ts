@@ -51,7 +51,7 @@ function airCautions({ scenario, heat, year }: CautionFacts): Caution[] {
       text:
         hotLight.exhaustAirflowM3H === null
           ? `On the hot day the room is as warm as the ${rounded(scenario.climate.maxTempC)} °C that you allow; no fan can hold it. Burn the lamps at night or dim them.`
-          : `On the hot day it takes ${rounded(hotLight.exhaustAirflowM3H)} m³/h of air to hold ${rounded(scenario.climate.maxTempC)} °C; ${capacity > 0 ? `the fan gives ${rounded(capacity)}` : 'no fan is planned'}.`,
+          : `On the hot day it takes ${rounded(hotLight.exhaustAirflowM3H)} m³/h of air to hold ${rounded(scenario.climate.maxTempC)} °C; ${capacity > 0 ? `the fan gives ${rounded(capacity)} m³/h` : 'no fan is planned'}.`,
       source: 'Computed',
     });
   }

@@ -154,7 +154,7 @@ function warningsOf(scenario: ResolvedScenario, { heat, year, room, withYear }: 
     );
   if (withYear && year.months.some(({ airTempC }) => airTempC.min <= COLDEST_C || airTempC.max >= HOTTEST_C))
     warnings.push(
-      `In some hours nothing holds the tent's temperature: it is reckoned no further than ${COLDEST_C} and ${HOTTEST_C} °C. Check the lamps' watts and what the fabric, the floor and the air let through.`,
+      `In some hours nothing holds the tent's temperature: it is reckoned no further than ${COLDEST_C} °C and ${HOTTEST_C} °C. Check the lamps' watts and what the fabric, the floor and the air let through.`,
     );
   if (room.drawnIn)
     warnings.push(

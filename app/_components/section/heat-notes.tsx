@@ -1,6 +1,7 @@
 'use client';
 
 /** Left of the tent: what burns and what blows, and the inspector of the one thing that is chosen. */
+import { Sentence } from '../sentence';
 import { Explainable } from '../explain';
 import { Num } from '../num';
 import type { NoteBlock } from './annotation-column';
@@ -128,7 +129,7 @@ export function HeaterWords({ context, short }: { context: SectionContext; short
       )}
       {caution && !short && (
         <p className="mt-1 max-w-[24rem] text-12">
-          <span className="font-semibold text-ember-ink">Caution.</span> {caution.text}
+          <span className="font-semibold text-ember-ink">Caution.</span> <Sentence text={caution.text} />
         </p>
       )}
     </div>

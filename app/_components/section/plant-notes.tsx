@@ -1,6 +1,7 @@
 'use client';
 
 /** Right of the tent: what grows and what drinks, each sentence beside its thing. */
+import { possessive } from '@/lib/format/possessive';
 import { Explainable } from '../explain';
 import { Num } from '../num';
 import type { NoteBlock } from './annotation-column';
@@ -147,7 +148,7 @@ function StripNote({ tier, verdict }: { tier: TierModel; verdict: TierVerdict })
     <p className="text-12 text-ink-soft">
       The strip: {low.toFixed(0)} at its lowest, {high.toFixed(0)} at its highest
       {verdict.low !== null && verdict.high !== null && seconds > 0
-        ? `; the bracket: ${(verdict.low / seconds).toFixed(0)} to ${(verdict.high / seconds).toFixed(0)}, ${verdict.crop}’s band in ${Number(verdict.hours.toFixed(1))} h.`
+        ? `; the bracket: ${(verdict.low / seconds).toFixed(0)} to ${(verdict.high / seconds).toFixed(0)}, ${possessive(verdict.crop ?? 'its crop')} band in ${Number(verdict.hours.toFixed(1))} h.`
         : '.'}
     </p>
   );

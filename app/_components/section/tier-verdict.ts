@@ -1,4 +1,5 @@
 /** A tier's verdict as words, from its evaluation and its crop's band. */
+import { possessive } from '@/lib/format/possessive';
 import type { Evaluation, ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
 
 type Tier = ScenarioDocument['tiers'][number];
@@ -77,6 +78,7 @@ export function verdictWords(verdict: TierVerdict): string {
   const figure = (value: number) => String(Number(value.toFixed(1)));
   if (low === null || high === null) return ' mol a day';
   if (verdict.verdict === 'below') return ` of the ${figure(low)} mol it needs`;
-  if (verdict.verdict === 'above') return ` mol a day, above ${crop}’s ${figure(low)} to ${figure(high)}`;
-  return ` mol a day, inside ${crop}’s ${figure(low)} to ${figure(high)}`;
+  if (verdict.verdict === 'above')
+    return ` mol a day, above ${possessive(crop ?? 'its crop')} ${figure(low)} to ${figure(high)}`;
+  return ` mol a day, inside ${possessive(crop ?? 'its crop')} ${figure(low)} to ${figure(high)}`;
 }

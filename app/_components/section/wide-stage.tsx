@@ -45,10 +45,11 @@ export function WideStage(props: WideStageProps) {
   const leftWidth = centre - 290 - leftX;
   const rightX = centre + 264;
   const rightWidth = Math.min(412, widthPx - 44 - rightX);
-  const circuits = input.evaluation?.circuits.length ?? 0;
+  // A circuit's words need two lines in a narrow column.
+  const circuitsPx = (input.evaluation?.circuits.length ?? 0) * (rightWidth < 390 ? 35 : 18);
   // A first frame at the usual floor tells what the columns need; a fuller column lowers the floor.
   const floorPx =
-    FLOOR_PX + Math.max(0, Math.ceil(columnsNeedPx(heights) - (FLOOR_PX - COLUMN_TOP_PX - 20 - circuits * 18)));
+    FLOOR_PX + Math.max(0, Math.ceil(columnsNeedPx(heights) - (FLOOR_PX - COLUMN_TOP_PX - 20 - circuitsPx)));
   const { widthM, depthM, heightM } = doc.tent;
   const frame = useMemo(
     () => sectionFrame({ widthM, depthM, heightM }, view, { ...TENT, centrePx: centre, floorPx }),
@@ -145,7 +146,7 @@ export function WideStage(props: WideStageProps) {
         <div className="flex justify-end">
           <ViewChoice view={view} choose={chooseView} />
         </div>
-        <div className="-mt-1 pr-2">
+        <div className="pt-1 pr-2">
           <DrawingKey bar={small} />
         </div>
       </div>
@@ -175,15 +176,12 @@ export function WideStage(props: WideStageProps) {
             xPx: rightX,
             widthPx: rightWidth,
             topPx: rightTop,
-            bottomPx: floorPx - 14 - circuits * 18,
+            bottomPx: floorPx - 14 - circuitsPx,
             bendPx: rightX - 40,
           }}
         />
       )}
-      <div
-        className="absolute"
-        style={{ right: Math.max(24, widthPx - rightX - rightWidth), top: floorPx - 6 - circuits * 18 }}
-      >
+      <div className="absolute -translate-y-full" style={{ left: rightX, width: rightWidth, top: floorPx - 6 }}>
         <CircuitWords context={context} />
       </div>
       <div

@@ -1,4 +1,5 @@
 /** What a tent wants from a person, in one sentence; the first thing that holds is said. */
+import { possessive } from '@/lib/format/possessive';
 import type { Evaluation, ScenarioDocument, Verdict } from '@/lib/evaluation/evaluate-scenario';
 import {
   shortCrop,
@@ -118,7 +119,7 @@ function aboutLight(each: Case, verdicts: ReadonlyMap<string, TierVerdict>): Ten
     figure,
     sentence: below
       ? ` of the ${plain(worst.low)} mol its ${worst.crop} needs.`
-      : ` mol a day, above ${worst.crop}’s ${plain(worst.low)} to ${plain(worst.high)}.`,
+      : ` mol a day, above ${possessive(worst.crop ?? 'its crop')} ${plain(worst.low)} to ${plain(worst.high)}.`,
     clause: `the ${worst.crop} in the ${tentName} ${below ? 'is short of light' : 'gets too much light'}`,
     link: { words: `Look at ${tierNameInside(doc.tiers, tierId)}`, page: '' },
     tierId,

@@ -1,5 +1,6 @@
 'use client';
 
+import { Sentence } from '@/app/_components/sentence';
 import { Explainable } from '@/app/_components/explain';
 import { TableBehind } from '@/app/_components/table-behind';
 import { useUnits } from '@/app/_components/units-context';
@@ -48,7 +49,9 @@ export function ClimateView({ workbench, document, evaluation }: ClimateViewProp
       </div>
       <section className="pt-12">
         <h2 className="text-22">The year in the tent</h2>
-        <p className="pt-1 text-12 text-ink-soft">{evaluation.warnings.join(' ')}</p>
+        <p className="pt-1 text-12 text-ink-soft">
+          <Sentence text={evaluation.warnings.join(' ')} />
+        </p>
         <YearTable evaluation={evaluation} />
       </section>
     </TentPanelPage>

@@ -1,5 +1,6 @@
 'use client';
 
+import { Sentence } from '@/app/_components/sentence';
 import { CautionNote } from '@/app/_components/caution-note';
 import { Explainable } from '@/app/_components/explain';
 import { Figure } from '@/app/_components/figure';
@@ -36,7 +37,12 @@ export function Sizing({ document, evaluation }: SizingProps) {
         </p>
         <div className="flex flex-col gap-3 pt-4">
           {about('heater.', 'circuit.noneForHeater').map((caution) => (
-            <CautionNote key={caution.code} severity={caution.severity} text={caution.text} source={caution.source} />
+            <CautionNote
+              key={caution.code}
+              severity={caution.severity}
+              text={<Sentence text={caution.text} />}
+              source={caution.source}
+            />
           ))}
         </div>
       </div>
@@ -81,7 +87,12 @@ export function Sizing({ document, evaluation }: SizingProps) {
         </p>
         <div className="flex flex-col gap-3 pt-4">
           {about('air.').map((caution) => (
-            <CautionNote key={caution.code} severity={caution.severity} text={caution.text} source={caution.source} />
+            <CautionNote
+              key={caution.code}
+              severity={caution.severity}
+              text={<Sentence text={caution.text} />}
+              source={caution.source}
+            />
           ))}
         </div>
       </div>

@@ -1,5 +1,6 @@
 'use client';
 
+import { Sentence } from '@/app/_components/sentence';
 import { CostLedger } from '@/app/_components/chart/cost-ledger';
 import { useWidth } from '@/app/_components/chart/use-width';
 import { CautionNote } from '@/app/_components/caution-note';
@@ -95,7 +96,7 @@ export function PowerView({ workbench, document, evaluation }: PowerViewProps) {
               <CautionNote
                 key={caution.code + caution.where}
                 severity={caution.severity}
-                text={caution.text}
+                text={<Sentence text={caution.text} />}
                 source={caution.source}
               />
             ))}
