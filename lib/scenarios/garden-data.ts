@@ -106,7 +106,12 @@ export function workbenchOf(data: GardenData, actor: GardenActor, scenario: Scen
     fixtures: data.fixtures,
     targets: targetsFor(data, scenario),
     referenceTariff: defaultTariff(data.garden.currency, referenceData().prices),
-    siblings: siblings.map(({ scenarioId, name, updatedAt }) => ({ scenarioId, name, updatedAt })),
+    siblings: siblings.map(({ scenarioId, name, updatedAt, plan }) => ({
+      scenarioId,
+      name,
+      updatedAt,
+      tierTopsM: plan.tiers.map((tier) => tier.topHeightM),
+    })),
     otherLoads: otherLoadsFor(data, room, tent.tentId),
     can: allowedActions(actor.role),
   };

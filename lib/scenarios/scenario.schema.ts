@@ -56,7 +56,7 @@ export interface Workbench {
   targets: ResolvedTarget[];
   /** The price that stands in where the room's is not known. */
   referenceTariff: ReferenceTariff;
-  siblings: { scenarioId: string; name: string; updatedAt: string }[];
+  siblings: { scenarioId: string; name: string; updatedAt: string; tierTopsM: number[] }[];
   /** W that other tents' current scenarios put on each circuit. */
   otherLoads: Record<string, number>;
   can: Record<Action, boolean>;

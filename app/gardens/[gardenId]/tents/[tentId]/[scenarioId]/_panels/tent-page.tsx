@@ -20,7 +20,16 @@ interface TentPanelPageProps {
 export function TentPanelPage({ workbench, document, evaluation, page, headline, lead, children }: TentPanelPageProps) {
   const { garden, tent, room, siblings, scenario } = workbench;
   const explain = useCallback((path: string) => explainFigure(document, evaluation, path), [document, evaluation]);
-  const plates = useMemo(() => siblings.map(({ scenarioId, name }) => ({ scenarioId, name })), [siblings]);
+  const { heightM } = tent.body;
+  const plates = useMemo(
+    () =>
+      siblings.map(({ scenarioId, name, tierTopsM }) => ({
+        scenarioId,
+        name,
+        tierHeightsFrac: tierTopsM.map((topM) => topM / heightM),
+      })),
+    [siblings, heightM],
+  );
   return (
     <ExplainProvider explain={explain}>
       <TentFrame

@@ -113,6 +113,8 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
   const units = useUnits();
   const temp = (value: number) => formatQuantity(value, 'temperature', units).figure;
   const unit = formatQuantity(0, 'temperature', units).unit;
+  const degreeHours = (value: number) => formatQuantity(value, 'temperatureDifference', units, { digits: 0 });
+  const water = (value: number) => formatQuantity(value, 'volume', units, { digits: 0 });
   const plain = (value: number) => value.toFixed(0);
   const span = (low: string, high: string) => (low === high ? low : `${low} to ${high}`);
   return (
@@ -134,10 +136,10 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
               `Mean, ${unit}`,
               `Warmest, ${unit}`,
               'Humidity, %',
-              'Too cold, h·K',
-              'Too warm, h·K',
+              `Too cold, h·${degreeHours(0).unit}`,
+              `Too warm, h·${degreeHours(0).unit}`,
               'Wall wet, h',
-              'Water, L',
+              `Water, ${water(0).unit}`,
             ].map((head) => (
               <th key={head} scope="col" className="py-1 pl-4 text-right font-normal">
                 {head}
@@ -156,10 +158,10 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
                 temp(month.airTempC.mean),
                 temp(month.airTempC.max),
                 span(plain(month.relHumidityPct.min), plain(month.relHumidityPct.max)),
-                plain(month.unmetHeatKh),
-                plain(month.overheatKh),
+                degreeHours(month.unmetHeatKh).figure,
+                degreeHours(month.overheatKh).figure,
                 plain(month.condensationH),
-                plain(month.waterL),
+                water(month.waterL).figure,
               ].map((cell, at) => (
                 <td key={at} className="py-1 pl-4 text-right">
                   {cell}
@@ -169,6 +171,10 @@ function YearTable({ evaluation }: { evaluation: Evaluation }) {
           ))}
         </tbody>
       </table>
+      <p className="pt-2 text-12 text-ink-soft">
+        Too cold, too warm: each hour times the degrees by which it misses what is to be kept. Water: what the plants
+        and trays give off.
+      </p>
     </div>
   );
 }
