@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { NOT_ONE_LINE, ONE_LINE } from '../format/one-line';
 
 export const PASSPHRASE_LEAST = 15;
 export const PASSPHRASE_MOST = 256;
@@ -27,7 +28,8 @@ export const displayNameField = z
   .string({ error: 'Type the name that others should see.' })
   .trim()
   .min(1, 'Type the name that others should see.')
-  .max(80, 'At most 80 characters.');
+  .max(80, 'At most 80 characters.')
+  .regex(ONE_LINE, NOT_ONE_LINE);
 
 export const unitSystemField = z.enum(['metric', 'us'], { error: 'Choose metric or US units.' });
 export const themeField = z.enum(['system', 'limewash', 'cellar'], { error: 'Choose one of the three.' });

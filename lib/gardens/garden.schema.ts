@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { NOT_ONE_LINE, ONE_LINE } from '../format/one-line';
 import type { Role } from '../db/database';
 
 export const gardenParams = z.object({ gardenId: z.uuid() });
@@ -7,7 +8,8 @@ export const nameField = z
   .string({ error: 'Type a name.' })
   .trim()
   .min(1, 'Type a name.')
-  .max(80, 'At most 80 characters.');
+  .max(80, 'At most 80 characters.')
+  .regex(ONE_LINE, NOT_ONE_LINE);
 export const versionField = z.int({ error: 'Say which version you saw.' }).positive();
 
 /** A new row may bring its own id, so that sending it twice makes it once. */
