@@ -7,8 +7,9 @@ const switches = ['gpu', 'quic', 'background-networking', 'component-update', 's
 export default defineConfig({
   testDir: 'tests/e2e',
   outputDir: '.data/test/browser',
-  // One at a time: the app and the database share the machine with the browser.
-  workers: 1,
+  // Two at a time: one would leave a core idle, three would wait for the app, which shares the machine with the browsers.
+  workers: 2,
+  fullyParallel: true,
   retries: 0,
   timeout: 60_000,
   expect: { timeout: 10_000 },

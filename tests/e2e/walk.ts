@@ -6,7 +6,8 @@ export async function isAccessible(page: Page, where: string) {
   // At the end of the page a bar that sticks to the foot stands in its own place and covers no target.
   await page.evaluate(() => scrollTo({ top: document.documentElement.scrollHeight, behavior: 'instant' }));
   const tags = ['wcag2a', 'wcag2aa', 'wcag21aa', 'wcag22aa'];
-  const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
+  // Without frames in the page there is nothing to gather from them in a second one: "legacy" is the same check, twice as fast.
+  const { violations } = await new AxeBuilder({ page }).setLegacyMode().withTags(tags).analyze();
   const words = violations.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.target.join(' ')).join(', ')}`);
   expect(words, where).toEqual([]);
   const wide = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
