@@ -36,8 +36,15 @@ export const currencySymbol = (currency: string): string => symbols[currency] ??
 export function formatMoney(major: number, currency: string, options: { digits?: number } = {}): string {
   const most = Math.log10(minorPerMajor(currency));
   const digits = options.digits ?? (Math.abs(major) >= 1000 ? 0 : most);
-  const figure = figureText(major, Math.min(digits, Math.max(most, digits)));
+  const figure = figureText(major, digits);
   return `${figure.startsWith('−') ? '−' : ''}${currencySymbol(currency)}\u00a0${figure.replace('−', '')}`;
+}
+
+/** A price of a kWh: `€ 0.287`, with as many digits as it has, four at most. */
+export function formatPrice(perKwh: number, currency: string): string {
+  const least = Math.log10(minorPerMajor(currency));
+  const written = Number(perKwh.toFixed(4)).toString().split('.')[1]?.length ?? 0;
+  return formatMoney(perKwh, currency, { digits: Math.max(least, written) });
 }
 
 export const formatMinor = (minor: number, currency: string): string =>

@@ -55,19 +55,19 @@ export function AmpereBar({ pieces, ratingA, limitA, label }: AmpereBarProps) {
       <svg width={widthPx} height={topPx + BAR_PX + 24} role="img" aria-label={label} className="block">
         <Patterns prefix={prefix} />
         {placed.map((piece, at) => {
-          const { level, xPx } = stairs[at]!;
+          const { level, leaderPx, textPx, anchor } = stairs[at]!;
           const baselinePx = topPx - 6 - level * LINE_PX;
           return (
             <g key={piece.key}>
               {level > 0 && (
                 <path
-                  d={`M${piece.startPx + 0.5} ${topPx}V${baselinePx - 4}h5`}
+                  d={`M${leaderPx} ${topPx}V${baselinePx - 4}h${anchor === 'start' ? 5 : -5}`}
                   fill="none"
                   stroke="var(--ink-soft)"
                   strokeWidth="0.75"
                 />
               )}
-              <text x={level > 0 ? xPx + 8 : xPx + 1} y={baselinePx} fontSize="12" fill="var(--ink)">
+              <text x={textPx} y={baselinePx} textAnchor={anchor} fontSize="12" fill="var(--ink)">
                 {piece.label}
               </text>
             </g>

@@ -31,7 +31,7 @@ export function tierNotes(context: SectionContext): NoteBlock[] {
       toPx: [tier.shelf.x1 - 10, (tier.leafY + tier.shelf.y0) / 2],
       selected,
     });
-    if (!many && tier.strip?.form === 'full' && verdict)
+    if (!many && tier.strip?.form === 'full' && verdict && verdict.maxDli > 0)
       blocks.push({
         id: `strip-${tier.tier.id}`,
         node: <StripNote tier={tier} verdict={verdict} />,
@@ -72,7 +72,12 @@ export function TierNote({ context, tier, verdict, short, compact }: TierNotePro
           ? `: ${verdict.crop}, ${verdict.stage}`
           : named
             ? `: ${named}; no light is known for it yet`
-            : ': no crop chosen'}
+            : ': '}
+        {!verdict?.crop && !named && (
+          <button type="button" className={dotted} onClick={() => select({ kind: 'tier', id })}>
+            choose what grows here
+          </button>
+        )}
         {sites && !compact ? `, ${sites.rows * sites.columns} sites` : ''}
       </p>
       {verdict && (
@@ -100,7 +105,8 @@ export function TierNote({ context, tier, verdict, short, compact }: TierNotePro
           {words.wayPrice(way)}
         </p>
       ))}
-      {verdict && !short && (
+      {verdict && verdict.maxDli === 0 && <p className="text-12 text-ink-soft">No lamp reaches it yet.</p>}
+      {verdict && verdict.maxDli > 0 && !short && (
         <p className="text-12 text-ink-soft">
           From {verdict.minDli.toFixed(1)} in its dimmest spot to {verdict.maxDli.toFixed(1)} in its brightest; evenness{' '}
           <Explainable path={`tiers.${id}.evenness`}>

@@ -2,7 +2,7 @@
 
 /** Under the floor slab: what the tent draws from the house. */
 import { useId } from 'react';
-import { formatMoney } from '@/lib/format/money';
+import { formatMoney, formatPrice } from '@/lib/format/money';
 import { figureText } from '@/lib/format/figure';
 import { Explainable } from '../explain';
 import { Num } from '../num';
@@ -41,7 +41,7 @@ export function billOf(context: SectionContext): Bill | null {
 
 export function priceWords({ doc, currency }: SectionContext): string {
   const { tariff } = doc.power;
-  if (tariff.kind === 'flat') return `at ${formatMoney(tariff.pricePerKwh, currency)} a kWh`;
+  if (tariff.kind === 'flat') return `at ${formatPrice(tariff.pricePerKwh, currency)} a kWh`;
   return tariff.kind === 'timeOfUse' ? 'by the hour’s price' : 'by the month’s steps';
 }
 

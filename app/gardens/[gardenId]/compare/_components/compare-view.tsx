@@ -40,7 +40,13 @@ export function CompareView({ garden, choices, comparison }: CompareViewProps) {
     if (next.length > 0) go(next, base.scenarioId);
   };
   return (
-    <PageFrame garden={garden} current="compare" crumbs={[{ words: 'compare' }]} headline={headline(columns, base)}>
+    <PageFrame
+      garden={garden}
+      current="compare"
+      crumbs={[{ words: 'compare' }]}
+      headline={headline(columns, base)}
+      lead={columns.length === 1 && <TryAnother gardenId={garden.gardenId} column={base} />}
+    >
       <div className="relative overflow-x-auto pt-8">
         <CompareTable columns={columns} base={base} gardenId={garden.gardenId} />
       </div>
@@ -89,6 +95,14 @@ export function CompareView({ garden, choices, comparison }: CompareViewProps) {
   );
 }
 
+function TryAnother({ gardenId, column }: { gardenId: string; column: ComparisonColumn }) {
+  return (
+    <TextLink href={`/gardens/${gardenId}/tents/${column.tentId}/${column.scenarioId}`}>
+      Open its section and press “Try another”
+    </TextLink>
+  );
+}
+
 function CompareTable({
   columns,
   base,
@@ -109,13 +123,13 @@ function CompareTable({
   const upFront = (column: ComparisonColumn) => column.upFrontMinor / minorPerMajor(column.currency);
   return (
     <table
-      className="w-full border-separate border-spacing-x-4 border-spacing-y-0 text-14 -mx-4"
+      className="border-separate border-spacing-x-4 border-spacing-y-0 text-14 -mx-4"
       style={{ minWidth: `${11 + columns.length * 15}rem` }}
     >
       <caption className="sr-only">Scenarios side by side, differences from {base.name}</caption>
       <thead>
         <tr className="text-left align-bottom">
-          <td className="w-45" />
+          <td className="w-45 min-w-45" />
           {columns.map((column) => (
             <th
               key={column.scenarioId}

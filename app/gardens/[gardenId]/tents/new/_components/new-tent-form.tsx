@@ -8,7 +8,9 @@ import { Choice } from '@/app/_components/choice';
 import { TextLink } from '@/app/_components/link';
 import { SelectField } from '@/app/_components/select-field';
 import { TextField } from '@/app/_components/text-field';
+import { useUnits } from '@/app/_components/units-context';
 import { ApiError } from '@/lib/http/api-client';
+import { firstSizes } from '@/lib/tents/first-sizes';
 import { useCreateTent } from '@/lib/tents/tent.hooks';
 import { SizedTent, type TentSizes } from './sized-tent';
 
@@ -27,7 +29,7 @@ export function NewTentForm({ gardenId, rooms, wanted }: NewTentFormProps) {
   const [tentId] = useState(() => crypto.randomUUID());
   const [roomId, setRoomId] = useState(wanted);
   const [name, setName] = useState('');
-  const [sizes, setSizes] = useState<TentSizes>({ widthM: 1.2, depthM: 1.2, heightM: 1.8 });
+  const [sizes, setSizes] = useState<TentSizes>(firstSizes[useUnits()]);
   const [tiers, setTiers] = useState<TierCount>('2');
   const [problem, setProblem] = useState<{ name?: string; form?: string }>({});
   const field = useRef<HTMLInputElement>(null);

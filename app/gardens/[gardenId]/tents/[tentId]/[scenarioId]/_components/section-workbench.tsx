@@ -16,6 +16,7 @@ import { saveScenario } from '@/lib/scenarios/scenario.hooks';
 import type { Workbench } from '@/lib/scenarios/scenario.schema';
 import { usePlanEditor } from '@/lib/scenarios/use-plan-editor';
 import { EditorState } from './editor-state';
+import { plateFact } from './plate-facts';
 import { ScenarioVerbs } from './scenario-verbs';
 import { useDocuments, useTargets } from './use-scenario-document';
 import { useSlots } from './use-slots';
@@ -65,7 +66,12 @@ export function SectionWorkbench({ workbench, evaluation, plates, initialWidthPx
     [mayEdit, editor.held, settled, apply, preview],
   );
   const slots = useSlots({ workbench, editor, documentOf, targets, setTent: body.set });
-  const shownPlates = plates.map((plate) => (plate.scenarioId === scenarioId ? { ...plate, name } : plate));
+  const tierHeightsFrac = doc.tiers.map((tier) => tier.topHeightM / doc.tent.heightM);
+  const shownPlates = plates.map((plate) =>
+    plate.scenarioId === scenarioId
+      ? { ...plate, name, fact: plateFact(workbench, live.evaluation ?? evaluation), tierHeightsFrac }
+      : plate,
+  );
   return (
     <TentFrame
       gardenId={gardenId}

@@ -106,9 +106,15 @@ function hotRow({ document, evaluation, units }: Context): BalanceRow {
     ]),
     gap: null,
   };
-  if (needed === null && hot.excessW > 0) {
+  if (hot.excessW <= 0) {
+    row.gap = {
+      tone: 'over',
+      figure: 'Stays cooler',
+      words: 'more leaves than comes in: no air is needed against heat',
+    };
+  } else if (needed === null) {
     row.gap = { tone: 'short', figure: 'No fan can hold it', words: 'the room is as warm as the tent may be' };
-  } else if (needed !== null && hot.excessW > 0) {
+  } else {
     const airflow = formatQuantity(needed, 'airflow', units).text;
     const has = fan ? formatQuantity(fan.maxAirflowM3H, 'airflow', units).text : 'none planned';
     const enough = fan !== null && fan !== undefined && fan.maxAirflowM3H >= needed;

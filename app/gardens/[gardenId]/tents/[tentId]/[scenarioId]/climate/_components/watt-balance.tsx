@@ -86,21 +86,22 @@ function Labels({
 }) {
   const stairs = labelStair({ pieces, widthPx });
   return pieces.map((each, index) => {
-    const { level, xPx } = stairs[index]!;
+    const { level, leaderPx, textPx, anchor } = stairs[index]!;
     const baselinePx = direction < 0 ? yPx - 6 - level * LINE_PX : yPx + 14 + level * LINE_PX;
     const [figure, ...words] = each.label.split(' ');
     return (
       <g key={each.kind}>
         {level > 0 && (
           <path
-            d={`M${each.startPx + 1} ${yPx}V${baselinePx - 4}h5`}
+            d={`M${leaderPx} ${yPx}V${baselinePx - 4}h${anchor === 'start' ? 5 : -5}`}
             fill="none"
             stroke="var(--ink-soft)"
             strokeWidth="0.75"
           />
         )}
         <text
-          x={level > 0 ? xPx + 8 : xPx + 1}
+          x={textPx}
+          textAnchor={anchor}
           y={baselinePx}
           fontSize="12"
           fill={each.kind === 'short' ? 'var(--ember-ink)' : 'var(--ink)'}

@@ -9,7 +9,7 @@ import { TextLink } from '@/app/_components/link';
 import { TableBehind } from '@/app/_components/table-behind';
 import type { Device, Evaluation, ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
 import { figureText } from '@/lib/format/figure';
-import { formatMoney } from '@/lib/format/money';
+import { formatMoney, formatPrice } from '@/lib/format/money';
 import type { Workbench } from '@/lib/scenarios/scenario.schema';
 import { MONTH_NAMES, MONTHS_SHORT } from '../../_panels/month-names';
 import { TentPanelPage } from '../../_panels/tent-page';
@@ -62,10 +62,8 @@ export function PowerView({ workbench, document, evaluation }: PowerViewProps) {
         {workbench.room.power.tariff === null && (
           <>
             The price is a default,{' '}
-            {document.power.tariff.kind === 'flat'
-              ? formatMoney(document.power.tariff.pricePerKwh, currency, { digits: 3 })
-              : ''}{' '}
-            a kWh: {workbench.referenceTariff.source}.{' '}
+            {document.power.tariff.kind === 'flat' ? formatPrice(document.power.tariff.pricePerKwh, currency) : ''} a
+            kWh: {workbench.referenceTariff.source}.{' '}
             <TextLink href={`/gardens/${workbench.garden.gardenId}/rooms/${workbench.room.roomId}`}>
               Type yours
             </TextLink>{' '}
