@@ -226,3 +226,13 @@ export function gammaQuantiles(distribution: Distribution, count: number): Float
     }
   }
 }
+
+/** Finer than any table that is read. */
+const FORWARD_QUANTILES = 4000;
+
+/** The share of a face's photons that leave it forwards; a table may send some into its own body. 1 for all else. */
+export function forwardShare(distribution: Distribution, hasFace: boolean): number {
+  if (!hasFace || distribution.type !== 'table' || distribution.gammaDeg.at(-1)! <= 90) return 1;
+  const gammas = gammaQuantiles(distribution, FORWARD_QUANTILES);
+  return gammas.filter((gamma) => gamma <= Math.PI / 2).length / FORWARD_QUANTILES;
+}
