@@ -21,7 +21,8 @@ export const passphraseField = z
 
 export function missingLetters(length: number): string {
   const missing = PASSPHRASE_LEAST - length;
-  return `${missing} ${missing === 1 ? 'letter' : 'letters'} more. One further word will do.`;
+  if (length === 0) return `At least ${PASSPHRASE_LEAST} characters: four words will do.`;
+  return `${missing} ${missing === 1 ? 'character' : 'characters'} more.${missing < 9 ? ' One further word will do.' : ''}`;
 }
 
 export const displayNameField = z

@@ -26,6 +26,7 @@ export interface ComparisonColumn {
   months: { cost: number; costByDevice: Record<Device, number> }[];
   currency: string;
   dangers: number;
+  warnings: number;
 }
 
 export interface ComparisonSource {
@@ -63,6 +64,7 @@ export function comparisonColumn({ document, evaluation, ...names }: ComparisonS
     months: year.months.map(({ cost, costByDevice }) => ({ cost, costByDevice })),
     currency: document.power.tariff.currency,
     dangers: evaluation.cautions.filter((caution) => caution.severity === 'danger').length,
+    warnings: evaluation.cautions.filter((caution) => caution.severity === 'warning').length,
   };
 }
 

@@ -21,7 +21,7 @@ const unreachable: ApiProblem = {
   type: '/problems/unreachable',
   title: 'The server cannot be reached.',
   status: 0,
-  detail: 'What you typed is kept here. It is sent again as soon as the server answers.',
+  detail: 'What you typed is kept here. Try again when the server answers.',
 };
 
 async function answer<T>(sending: Promise<Response>): Promise<T> {

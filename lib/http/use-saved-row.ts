@@ -1,6 +1,6 @@
 'use client';
 
-import { useCallback, useRef, useState } from 'react';
+import { useCallback, useEffect, useRef, useState } from 'react';
 import { ApiError } from './api-client';
 
 export type RowStatus = 'saved' | 'saving' | 'unsaved' | 'offline' | 'waiting';
@@ -25,6 +25,9 @@ export interface SavedRow<T extends Versioned> {
   takeTheirs: () => void;
 }
 
+/** How long after a server that did not answer it is asked again. */
+const RETRY_MS = 4000;
+
 /**
  * A row that saves by itself. Saves go one after another against the version last seen; a clash keeps both until somebody chooses.
  */
@@ -42,6 +45,7 @@ export function useSavedRow<T extends Versioned>(
   const waiting = useRef<Partial<T>>({});
   const sending = useRef(false);
 
+  const again = useRef(async () => {});
   const send = useCallback(async () => {
     if (sending.current) return;
     sending.current = true;
@@ -53,6 +57,8 @@ export function useSavedRow<T extends Versioned>(
         try {
           const saved = await save(patch, version.current);
           version.current = saved.version;
+          // What the server derives from the change comes back with it; what was typed meanwhile stays on top.
+          setRow({ ...saved, ...waiting.current });
           setProblem(null);
           setSavedAt(Date.now());
           setStatus('saved');
@@ -65,6 +71,7 @@ export function useSavedRow<T extends Versioned>(
           } else {
             setProblem(error.problem.problems?.[0]?.message ?? error.problem.detail ?? error.problem.title);
             setStatus(error.status === 0 ? 'offline' : 'unsaved');
+            if (error.status === 0) setTimeout(() => void again.current(), RETRY_MS);
           }
           return;
         }
@@ -73,6 +80,10 @@ export function useSavedRow<T extends Versioned>(
       sending.current = false;
     }
   }, [save]);
+
+  useEffect(() => {
+    again.current = send;
+  }, [send]);
 
   const lay = useCallback(
     (patch: Partial<T>) => {

@@ -17,10 +17,12 @@ export interface LandingCrop {
 
 const LAMP = 'bar-left';
 
+const OWN_NAME = 'A new tent';
+
 /** An empty tent in the same cellar, to draw one's own. */
 function emptied(doc: ScenarioDocument): ScenarioDocument {
   const { heater: _heater, exhaust: _exhaust, ...climate } = doc.climate;
-  return { ...doc, name: 'A new tent', tiers: [], placements: [], climate, water: undefined };
+  return { ...doc, name: OWN_NAME, tiers: [], placements: [], climate, water: undefined };
 }
 
 /** The lamp has the keys from the start, unless a finger or a link came first. */
@@ -54,7 +56,7 @@ export function LandingTent({ document: example, crops }: { document: ScenarioDo
   const [drawing, setDrawing] = useState(false);
   const doc = edited ?? draft ?? example;
   // A drawing of one's own, from today or from before: its fields stand where the example's words would.
-  const own = drawing || (edited === null && draft !== null && draft.tiers.every((tier) => tier.id !== 'lower'));
+  const own = drawing || doc.name === OWN_NAME;
   const change = (next: ScenarioDocument) => {
     setEdited(next);
     keepDraft(next);

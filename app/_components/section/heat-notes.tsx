@@ -64,8 +64,10 @@ export function lampNotes(context: SectionContext, columnX: number): NoteBlock[]
 
 /** The inspector of anything but a lamp stands level with its thing. */
 export function otherInspector(context: SectionContext): NoteBlock[] {
-  const { selection, model } = context;
-  if (!selection || selection.kind === 'lamp' || selection.kind === 'heater') return [];
+  const { selection, model, doc } = context;
+  if (!selection || selection.kind === 'lamp') return [];
+  // A heater's fields stand beside the heater, where there is one.
+  if (selection.kind === 'heater' && doc.climate.heater) return [];
   const tier = selection.kind === 'tier' ? model.tiers.find((each) => each.tier.id === selection.id) : undefined;
   return [
     {

@@ -4,6 +4,7 @@ import { setHeater } from '@/lib/scenarios/edit-climate';
 import { Choice } from '../choice';
 import { CheckField } from '../check-field';
 import { QuantityField } from '../quantity-field';
+import { Sentence } from '../sentence';
 import { InspectorFrame, Pair, Verb } from './inspector';
 import type { SectionContext } from './section-context';
 
@@ -91,7 +92,7 @@ export function HeaterFields({ context }: { context: SectionContext }) {
       />
       {cautions.map((caution) => (
         <p key={caution.code + caution.where} className="w-[20rem] max-w-full text-12">
-          <span className="font-semibold text-ember-ink">Caution.</span> {caution.text}{' '}
+          <span className="font-semibold text-ember-ink">Caution.</span> <Sentence text={caution.text} />{' '}
           <span className="text-ink-soft">{caution.source}</span>
         </p>
       ))}

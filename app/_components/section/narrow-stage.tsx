@@ -185,7 +185,15 @@ function Rows({
   );
   const fan = fanNote(context)[0];
   const water = waterNote(context)[0];
-  const free = selection && (selection.kind === 'climate' || selection.kind === 'tent');
+  const { heater } = context.doc.climate;
+  // What is chosen without a row of its own: the air, the tent, a thing that is not there yet.
+  const free =
+    selection !== null &&
+    (selection.kind === 'climate' ||
+      selection.kind === 'tent' ||
+      (selection.kind === 'heater' && !heater) ||
+      (selection.kind === 'fan' && !fan) ||
+      (selection.kind === 'water' && !water));
   return (
     <ul>
       {tiers.map((tier) => {

@@ -2,6 +2,7 @@
 
 /** What stands beside the tent in the room: its air, what may be added, the circuits, the key of the drawing. */
 import { useState } from 'react';
+import { setExhaust, setHeater, setPump, setWater } from '@/lib/scenarios/edit-climate';
 import { addLamp, freshId } from '@/lib/scenarios/edit-plan';
 import { addTier } from '@/lib/scenarios/edit-rack';
 import { placeForLamp } from '@/lib/scenarios/lamp-range';
@@ -9,8 +10,13 @@ import { monthMean } from '@/lib/scenarios/coldest-month';
 import { Explainable } from '../explain';
 import { Num } from '../num';
 import { Verb } from './inspector';
+import type { PlanChange } from './plan-edit';
 import type { SectionContext } from './section-context';
 import { MONTHS } from './month-names';
+
+/** The smallest that is common, m³/h. */
+const LEAST_FAN_M3H = 100;
+const putInWater: PlanChange = (plan) => setPump(setWater(plan, { reservoirL: 40 }), 20);
 
 const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left';
 
@@ -61,6 +67,16 @@ export function AddWords({ context }: { context: SectionContext }) {
     select({ kind: 'lamp', id });
     setChoosing(false);
   };
+  // Of the size that the plan asks for, where that is known.
+  const heat = context.evaluation?.heat;
+  const putInHeater: PlanChange = (plan) =>
+    setHeater(plan, heat && heat.recommendedHeaterW > 0 ? { ratedPowerW: heat.recommendedHeaterW } : {});
+  const putInFan: PlanChange = (plan) =>
+    setExhaust(plan, { maxAirflowM3H: Math.max(LEAST_FAN_M3H, Math.ceil(heat?.recommendedExhaustM3H ?? 0)) });
+  const putIn = (kind: 'heater' | 'fan' | 'water', change: PlanChange) => {
+    edit.apply(change, `${kind} in`);
+    select({ kind });
+  };
   return (
     <div>
       <div className="flex flex-wrap gap-x-5 gap-y-1">
@@ -76,15 +92,19 @@ export function AddWords({ context }: { context: SectionContext }) {
         >
           Put in a shelf
         </Verb>
-        {!doc.climate.heater && <Verb onClick={() => select({ kind: 'heater' })}>A heater</Verb>}
-        {!doc.climate.exhaust && <Verb onClick={() => select({ kind: 'fan' })}>A fan</Verb>}
-        {!doc.water && <Verb onClick={() => select({ kind: 'water' })}>Water</Verb>}
+        {!doc.climate.heater && <Verb onClick={() => putIn('heater', putInHeater)}>A heater</Verb>}
+        {!doc.climate.exhaust && <Verb onClick={() => putIn('fan', putInFan)}>A fan</Verb>}
+        {!doc.water && <Verb onClick={() => putIn('water', putInWater)}>Water</Verb>}
         <button type="button" className={`${dotted} text-12 text-ink-soft`} onClick={() => select({ kind: 'tent' })}>
           The tent itself
         </button>
       </div>
       {choosing && (
-        <ul className="mt-1 border-l-[3px] border-lamp pl-3 text-14" aria-label="Which lamp">
+        <ul
+          className="relative z-20 mt-1 border-l-[3px] border-lamp bg-paper py-1 pl-3 text-14"
+          aria-label="Which lamp"
+          onKeyDown={(event) => event.key === 'Escape' && setChoosing(false)}
+        >
           {fixtures.map((fixture) => (
             <li key={fixture.id}>
               <button type="button" className={`${dotted} py-0.5`} onClick={() => hang(fixture.id)}>

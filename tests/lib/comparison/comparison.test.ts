@@ -33,6 +33,7 @@ const onTop: ComparisonColumn = {
   months: Array.from({ length: 12 }, (_, index) => month(30, index === 0 ? 20 : 9)),
   currency: 'EUR',
   dangers: 0,
+  warnings: 0,
 };
 
 /** Invented: a lamp per tier, 60 dearer and 5 a month cheaper. */

@@ -2,7 +2,7 @@
 
 import type { Route } from 'next';
 import { useRouter } from 'next/navigation';
-import { useRef, useState, type FormEvent } from 'react';
+import { useRef, useState, useSyncExternalStore, type FormEvent } from 'react';
 import { Button } from '@/app/_components/button';
 import { Choice } from '@/app/_components/choice';
 import { dropDraft, useDraft } from '@/app/_components/draft';
@@ -21,6 +21,8 @@ const money = currencies.map((code) => ({
   value: code,
   label: currencySymbol(code) === code ? code : `${code}, ${currencySymbol(code)}`,
 }));
+
+const neverChanges = () => () => {};
 
 /** The money of where the browser says one is; a first guess that stands in the field to be changed. */
 function currencyOfBrowser(): string {
@@ -69,7 +71,10 @@ export function NewGardenForm({ keeping, units: first }: NewGardenFormProps) {
     return id;
   };
 
-  const currency = chosen ?? typed?.currency ?? currencyOfBrowser();
+  // The server does not know the browser's region: the guess stands from hydration on, in the field as in what is sent.
+  const guessed = useSyncExternalStore(neverChanges, currencyOfBrowser, () => 'EUR');
+  // A drawing that is kept stays as it is, its money too.
+  const currency = chosen ?? (keeping && draft ? draft.power.tariff.currency : guessed);
 
   const submit = async (event: FormEvent) => {
     event.preventDefault();

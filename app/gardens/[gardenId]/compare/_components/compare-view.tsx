@@ -17,7 +17,7 @@ import { formatMoney, minorPerMajor } from '@/lib/format/money';
 import type { Garden } from '@/lib/gardens/garden.schema';
 import type { TentChoices } from '@/lib/scenarios/choices.service';
 import { CostAgainstLight } from './cost-against-light';
-import { difference, headline, lightWords, moneyDifference, paybackWords } from './compare-words';
+import { cautionWords, difference, headline, lightWords, moneyDifference, paybackWords } from './compare-words';
 import { LightRange } from './light-range';
 
 interface CompareViewProps {
@@ -189,7 +189,7 @@ function CompareTable({
             />
           )}
         </Row>
-        <Row label="Heat" note="needed on the coldest night" columns={columns}>
+        <Row label="Heat" note="needed in the coldest hours" columns={columns}>
           {(column) => (
             <>
               <Pair
@@ -252,8 +252,12 @@ function CompareTable({
             </>
           )}
         </Row>
-        <Row label="Dangers" note="cautions that must be put right" columns={columns}>
-          {(column) => <Pair value={column.dangers === 0 ? 'none' : String(column.dangers)} by={null} />}
+        <Row
+          label="Cautions"
+          note="dangers must be put right; warnings stand on each one’s power page"
+          columns={columns}
+        >
+          {(column) => <Pair value={cautionWords(column)} by={null} />}
         </Row>
       </tbody>
     </table>

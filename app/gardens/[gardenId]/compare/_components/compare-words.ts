@@ -41,6 +41,12 @@ export function headline(columns: readonly ComparisonColumn[], base: ComparisonC
   return `${words}, ${formatMoney(Math.abs(difference), cheapest.currency)} ${difference < 0 ? 'less' : 'more'} than ${base.name}.`;
 }
 
+/** `1 danger, 5 warnings`; never "none" while one stands. */
+export function cautionWords({ dangers, warnings }: Pick<ComparisonColumn, 'dangers' | 'warnings'>): string {
+  const some = (count: number, word: string) => (count === 0 ? [] : [`${count} ${word}${count === 1 ? '' : 's'}`]);
+  return [...some(dangers, 'danger'), ...some(warnings, 'warning')].join(', ') || 'none';
+}
+
 export function paybackWords(column: ComparisonColumn, base: ComparisonColumn): { text: string; note?: string } {
   if (column === base) return { text: '–' };
   const back: Payback = payback(column, base);

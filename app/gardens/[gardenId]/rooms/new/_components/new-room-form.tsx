@@ -55,7 +55,8 @@ export function NewRoomForm({ gardenId, dollars }: { gardenId: string; dollars: 
         climate: { airTempC: yearBetween({ coldC, warmC, south }) },
         power: {
           supplyV: Number(supply),
-          circuits: [{ id: 'c1', name: `${name.trim()} sockets`, ratingA: ratingA ?? usualA }],
+          // What nobody has read off the breaker is not given; loads are then not checked, and a caution says so.
+          circuits: ratingA === null ? [] : [{ id: 'c1', name: `${name.trim()} sockets`, ratingA }],
           tariff: null,
         },
         residualCurrentDevice: residual,
@@ -126,7 +127,7 @@ export function NewRoomForm({ gardenId, dollars }: { gardenId: string; dollars: 
           max={200}
           onCommit={setRatingA}
           isDefault={ratingA === null}
-          defaultReason="Read it on the breaker before you rest on it."
+          defaultReason="Read it on the breaker; until you do, no circuit is counted."
           onConfirmDefault={() => setRatingA(usualA)}
         />
       </div>

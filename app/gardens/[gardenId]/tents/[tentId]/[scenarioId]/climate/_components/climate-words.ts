@@ -7,7 +7,10 @@ interface Facts {
   units: UnitSystem;
 }
 
-const needOf = ({ heat }: Evaluation) => Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW);
+/** The state that needs most heat: not always the night, since the day is kept warmer. */
+const worstState = ({ heat }: Evaluation) =>
+  [heat.coldDark, heat.coldDawn, heat.coldLight].reduce((most, state) => (state.heaterW > most.heaterW ? state : most));
+const needOf = (evaluation: Evaluation) => worstState(evaluation).heaterW;
 
 /** The coldest hour a tent slips to, over the year; the set-point where it holds. */
 const coldest = ({ year }: Evaluation) => Math.min(...year.months.map((month) => month.airTempC.min));
@@ -21,17 +24,17 @@ export function climateHeadline({ document, evaluation, units }: Facts): string 
   if (need > rated + 0.5) {
     const slips = coldest(evaluation);
     return rated > 0
-      ? `On the coldest night the heater falls ${watt(need - rated)} short, and the tent slips to ${degrees(slips)}.`
-      : `Without a heater the tent falls to ${degrees(slips)}. Holding ${degrees(document.climate.nightTempC)} takes ${watt(need)}.`;
+      ? `In the coldest hours the heater falls ${watt(need - rated)} short, and the tent slips to ${degrees(slips)}.`
+      : `Without a heater the tent falls to ${degrees(slips)}. Holding ${degrees(worstState(evaluation).tentTempC)} takes ${watt(need)}.`;
   }
   const { hotLight } = evaluation.heat;
   const fan = document.climate.exhaust?.maxAirflowM3H ?? 0;
   if (hotLight.excessW > 0 && (hotLight.exhaustAirflowM3H === null || hotLight.exhaustAirflowM3H > fan)) {
-    return `It stays warm through the coldest night, but on the hot day it goes past ${degrees(document.climate.maxTempC)}.`;
+    return `It stays warm in the coldest hours, but on the hot day it goes past ${degrees(document.climate.maxTempC)}.`;
   }
-  if (evaluation.heat.wallDewMarginK < 0) return 'It stays warm through the coldest night, but the wall sweats.';
+  if (evaluation.heat.wallDewMarginK < 0) return 'It stays warm in the coldest hours, but the wall sweats.';
   return need > 0
-    ? `The ${watt(rated)} heater holds the coldest night with ${watt(rated - need)} to spare.`
+    ? `The ${watt(rated)} heater holds the coldest hours with ${watt(rated - need)} to spare.`
     : 'Lamps and fans alone keep it warm enough, even in the coldest hours.';
 }
 
@@ -41,7 +44,7 @@ export function climateLead({ document, evaluation, units }: Facts): string {
   const need = needOf(evaluation);
   const rated = document.climate.heater?.ratedPowerW ?? 0;
   if (need > rated + 0.5 && heat.recommendedHeaterW > 0) {
-    return `${formatQuantity(heat.recommendedHeaterW, 'power', units).text} would hold it, a quarter to spare. A quilt round the tent or a warmer room needs less.`;
+    return `${formatQuantity(heat.recommendedHeaterW, 'power', units).text} would hold it, with a quarter or more to spare. A quilt round the tent or a warmer room needs less.`;
   }
   if (
     heat.recommendedExhaustM3H !== null &&

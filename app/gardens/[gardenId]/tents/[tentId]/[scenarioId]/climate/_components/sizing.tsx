@@ -28,6 +28,9 @@ export function Sizing({ document, evaluation }: SizingProps) {
           ) : (
             'None is needed.'
           )}
+          {!document.climate.heater && heat.recommendedHeaterW > 0 && (
+            <span className="text-14 text-ink-soft"> None is planned; “A heater” in the section puts one in.</span>
+          )}
           {document.climate.heater && (
             <span className="text-14 text-ink-soft">
               {' '}
@@ -79,7 +82,7 @@ export function Sizing({ document, evaluation }: SizingProps) {
           />
         </ul>
         <p className="pt-3 text-14">
-          The wall stands{' '}
+          Held at what is to be kept, the wall stands{' '}
           <Explainable path="heat.wallDewMargin">
             <Figure value={Math.abs(heat.wallDewMarginK)} kind="temperatureDifference" />
           </Explainable>{' '}

@@ -43,10 +43,15 @@ export function PowerView({ workbench, document, evaluation }: PowerViewProps) {
   const { year } = evaluation;
   const cautions = evaluation.cautions.filter((caution) => /^(circuit|water|heater|plan)\./.test(caution.code));
   const net = year.netLightEnergyKwh;
+  const { coldDark, coldDawn, coldLight } = evaluation.heat;
+  const missingW =
+    Math.max(coldDark.heaterW, coldDawn.heaterW, coldLight.heaterW) - (document.climate.heater?.ratedPowerW ?? 0);
   const lead =
-    year.energyKwh.light > 1 && net < 0.9 * year.energyKwh.light
-      ? `Of the lamps’ ${figureText(year.energyKwh.light, 0)} kWh, ${figureText(year.energyKwh.light - net, 0)} replace heat that the heater would give: dimming them saves less than it seems.`
-      : 'Time-of-use prices and another start of the lamps are worth a comparison.';
+    missingW > 0.5
+      ? `Not in it: the ${figureText(missingW, 0)} W of heat that are missing in the coldest hours. A tent that is held warm costs more.`
+      : year.energyKwh.light > 1 && net < 0.9 * year.energyKwh.light
+        ? `Of the lamps’ ${figureText(year.energyKwh.light, 0)} kWh, ${figureText(year.energyKwh.light - net, 0)} replace heat that the heater would give: dimming them saves less than it seems.`
+        : 'Time-of-use prices and another start of the lamps are worth a comparison.';
   return (
     <TentPanelPage
       workbench={workbench}
