@@ -98,6 +98,8 @@ for (const { name, colorScheme, width, height, keys } of ways) {
       await hand.press(page.getByRole('button', { name: /Hang .*lamp/ }).first());
       await expect(page.getByText('Nothing to save yet')).toHaveCount(0);
       await isAccessible(page, 'the section with a lamp');
+      await hand.press(page.getByRole('button', { name: 'A heater', exact: true }));
+      await expect(page.getByLabel('Rated power, on its label')).toBeVisible();
 
       const first = page.url();
       await hand.press(page.getByRole('button', { name: 'Try another' }).first());

@@ -1,6 +1,7 @@
 'use client';
 
 /** What can be taken hold of, in the order in which Tab walks it: top to bottom, left to right. */
+import { useEffect, useRef } from 'react';
 import { lampRange } from '@/lib/scenarios/lamp-range';
 import { tierRange } from '@/lib/scenarios/edit-rack';
 import type { ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
@@ -34,6 +35,18 @@ const FOCUS = 'outline-lamp';
 
 export function HandleLayer(props: HandleLayerProps) {
   const { model } = props;
+  const { isHolding } = props.drag;
+  const layer = useRef<SVGGElement>(null);
+  // `touch-action` on a shape of a drawing does not keep every browser from scrolling away with the finger.
+  useEffect(() => {
+    const node = layer.current;
+    if (!node) return;
+    const keepStill = (event: TouchEvent) => {
+      if (isHolding() && event.cancelable) event.preventDefault();
+    };
+    node.addEventListener('touchmove', keepStill, { passive: false });
+    return () => node.removeEventListener('touchmove', keepStill);
+  }, [isHolding]);
   const things = [
     ...model.lamps.map((lamp) => ({
       y: lamp.outline.topPx,
@@ -48,7 +61,7 @@ export function HandleLayer(props: HandleLayerProps) {
   ].sort((a, b) => a.y - b.y || a.x - b.x);
   const { reservoir, heater, fan } = model;
   return (
-    <g>
+    <g ref={layer}>
       {things.map((thing) => thing.node)}
       {reservoir && <ThingHandle kind="water" label="Reservoir and pump" box={reservoir.box} {...props} />}
       {heater && <ThingHandle kind="heater" label="Heater" box={heater.box} {...props} />}

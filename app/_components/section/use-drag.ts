@@ -1,7 +1,7 @@
 'use client';
 
 /** Takes hold of a lamp or a shelf with mouse, pen or finger; the plan follows the hand and is kept on release. */
-import { useEffect, useRef, useState } from 'react';
+import { useCallback, useEffect, useRef, useState } from 'react';
 import { setLampAboveLeaves, setLampAcross, setLampSwing } from '@/lib/scenarios/edit-plan';
 import { slideTier, tierRange } from '@/lib/scenarios/edit-rack';
 import { lampAcrossRange, lampRange } from '@/lib/scenarios/lamp-range';
@@ -42,6 +42,8 @@ export interface Drag {
   /** The document as it was when something was taken hold of. */
   before: ScenarioDocument | null;
   grab: (event: React.PointerEvent, what: Held['what'], id: string, group: LampGroup | null) => void;
+  /** True from the touch on, before anything is drawn again. */
+  isHolding: () => boolean;
 }
 
 export function useDrag({ doc, frame, edit }: DragOptions): Drag {
@@ -93,7 +95,8 @@ export function useDrag({ doc, frame, edit }: DragOptions): Drag {
     grip.current = { what, id, axis: null, startX: event.clientX, startY: event.clientY, group, doc, change: null };
     setHeld({ held: { what, id, axis: null }, before: doc });
   };
-  return { held: held?.held ?? null, before: held?.before ?? null, grab };
+  const isHolding = useCallback(() => grip.current !== null, []);
+  return { held: held?.held ?? null, before: held?.before ?? null, grab, isHolding };
 }
 
 function changeFor(grip: Grip, frame: SectionFrame, event: { clientX: number; clientY: number }): PlanChange | null {
