@@ -145,3 +145,30 @@ test('a stranger’s drawing is kept as it was, with the price typed into it', a
   await expect(page.getByText('First layout')).toHaveCount(0);
   await expect(page.getByText('€ 0.37 a kWh').first()).toBeVisible();
 });
+
+test.describe('by finger', () => {
+  test.use({ viewport: { width: 360, height: 740 }, hasTouch: true, isMobile: true });
+
+  test('a lamp that was tapped follows the finger, and the page stays where it is', async ({ page }) => {
+    await page.goto('/');
+    const lamp = page.getByRole('slider', { name: /height above the leaves/ }).first();
+    const height = async () => Number(await lamp.getAttribute('aria-valuenow'));
+    const before = await height();
+    await lamp.tap();
+    const box = (await lamp.boundingBox())!;
+    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+    const scrolledFrom = await page.evaluate(() => scrollY);
+    // Chromium's own touches: a synthetic event would be trusted less than a finger.
+    const finger = await page.context().newCDPSession(page);
+    const touch = (type: 'touchStart' | 'touchMove' | 'touchEnd', downPx: number) =>
+      finger.send('Input.dispatchTouchEvent', {
+        type,
+        touchPoints: type === 'touchEnd' ? [] : [{ x, y: y + downPx }],
+      });
+    await touch('touchStart', 0);
+    for (const downPx of [4, 8, 12, 16, 20, 24]) await touch('touchMove', downPx);
+    await touch('touchEnd', 24);
+    await expect.poll(height).toBeLessThan(before);
+    expect(await page.evaluate(() => scrollY)).toBe(scrolledFrom);
+  });
+});

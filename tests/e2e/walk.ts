@@ -28,7 +28,8 @@ export const mouse: Hand = {
   fill: (field, text) => field.fill(text),
   press: (control) => control.click(),
   async lower(slider) {
-    await slider.scrollIntoViewIfNeeded();
+    // Waits until it stands still, in view and uncovered, also while the page before it is still going away.
+    await slider.hover();
     const box = (await slider.boundingBox())!;
     const { mouse: pointer } = slider.page();
     const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
