@@ -113,6 +113,8 @@ export function LandingTent({ document: example, crops }: { document: ScenarioDo
                     look="plain"
                     onClick={() => {
                       setDrawing(true);
+                      // The button stands at the foot; the empty tent begins at the top.
+                      window.scrollTo({ top: 0 });
                       change(emptied(example));
                     }}
                   >

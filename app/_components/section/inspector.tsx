@@ -40,10 +40,12 @@ interface InspectorFrameProps {
   context: SectionContext;
   children: ReactNode;
   verbs?: ReactNode;
+  /** Under the fields, as wide as the column allows. */
+  foot?: ReactNode;
 }
 
 /** Title, facts, one column of fields 214 px wide, and the hint beside them where there is room. */
-export function InspectorFrame({ title, facts, hint, context, children, verbs }: InspectorFrameProps) {
+export function InspectorFrame({ title, facts, hint, context, children, verbs, foot }: InspectorFrameProps) {
   const { select, edit } = context;
   return (
     <section aria-label={title} data-inspector="" className="@container">
@@ -63,6 +65,7 @@ export function InspectorFrame({ title, facts, hint, context, children, verbs }:
         <div className="hidden text-12 text-ink-soft @[21rem]:block">{edit.readOnly ?? hint}</div>
       </div>
       {edit.readOnly && <p className="mt-1 text-12 text-ink-soft @[21rem]:hidden">{edit.readOnly}</p>}
+      {foot}
       {verbs && edit.readOnly === null && <div className="mt-2 flex flex-wrap gap-x-4 gap-y-1">{verbs}</div>}
     </section>
   );

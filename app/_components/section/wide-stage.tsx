@@ -1,7 +1,7 @@
 'use client';
 
 /** The section on a wide page: the tent in the middle, what burns at its left, what grows at its right, the bill below. */
-import { useId, useMemo, useRef, type ReactNode } from 'react';
+import { useId, useMemo, useRef, useState, type ReactNode } from 'react';
 import { ExplainSheet } from '../explain';
 import { AnnotationColumn, columnsNeedPx, type NoteBlock } from './annotation-column';
 import { CautionsList } from './cautions-list';
@@ -48,8 +48,13 @@ export function WideStage(props: WideStageProps) {
   // A circuit's words need two lines in a narrow column.
   const circuitsPx = (input.evaluation?.circuits.length ?? 0) * (rightWidth < 390 ? 35 : 18);
   // A first frame at the usual floor tells what the columns need; a fuller column lowers the floor.
-  const floorPx =
+  const wantedFloorPx =
     FLOOR_PX + Math.max(0, Math.ceil(columnsNeedPx(heights) - (FLOOR_PX - COLUMN_TOP_PX - 20 - circuitsPx)));
+  // While something is held the drawing stands still under the pointer, whatever the words beside it grow to.
+  const { held } = input.edit;
+  const [keptFloorPx, setKeptFloorPx] = useState(wantedFloorPx);
+  if (!held && keptFloorPx !== wantedFloorPx) setKeptFloorPx(wantedFloorPx);
+  const floorPx = held ? keptFloorPx : wantedFloorPx;
   const { widthM, depthM, heightM } = doc.tent;
   const frame = useMemo(
     () => sectionFrame({ widthM, depthM, heightM }, view, { ...TENT, centrePx: centre, floorPx }),
