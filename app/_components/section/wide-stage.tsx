@@ -1,7 +1,7 @@
 'use client';
 
 /** The section on a wide page: the tent in the middle, what burns at its left, what grows at its right, the bill below. */
-import { useId, useMemo, useRef, useState, type ReactNode } from 'react';
+import { useCallback, useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react';
 import { ExplainSheet } from '../explain';
 import { AnnotationColumn, columnsNeedPx, type NoteBlock } from './annotation-column';
 import { CautionsList } from './cautions-list';
@@ -33,6 +33,23 @@ interface WideStageProps extends StageProps {
   left?: ReactNode;
 }
 
+/** True from the moment something is pressed until it is let go. */
+function usePressed() {
+  const [pressed, setPressed] = useState(false);
+  useEffect(() => {
+    if (!pressed) return;
+    // After the click that follows, so that what was pressed does not move away from under it.
+    const letGo = () => setTimeout(() => setPressed(false));
+    window.addEventListener('pointerup', letGo);
+    window.addEventListener('pointercancel', letGo);
+    return () => {
+      window.removeEventListener('pointerup', letGo);
+      window.removeEventListener('pointercancel', letGo);
+    };
+  }, [pressed]);
+  return { pressed, press: useCallback(() => setPressed(true), []) };
+}
+
 export function WideStage(props: WideStageProps) {
   const { widthPx, view, chooseView, input, state, left, footEnd, explaining } = props;
   const root = useRef<HTMLDivElement>(null);
@@ -51,7 +68,8 @@ export function WideStage(props: WideStageProps) {
   const wantedFloorPx =
     FLOOR_PX + Math.max(0, Math.ceil(columnsNeedPx(heights) - (FLOOR_PX - COLUMN_TOP_PX - 20 - circuitsPx)));
   // While something is held the drawing stands still under the pointer, whatever the words beside it grow to.
-  const { held } = input.edit;
+  const { pressed, press } = usePressed();
+  const held = pressed || input.edit.held;
   const [keptFloorPx, setKeptFloorPx] = useState(wantedFloorPx);
   if (!held && keptFloorPx !== wantedFloorPx) setKeptFloorPx(wantedFloorPx);
   const floorPx = held ? keptFloorPx : wantedFloorPx;
@@ -80,7 +98,12 @@ export function WideStage(props: WideStageProps) {
   const width = `${words.say(frame.acrossM, 'length')}${view === 'side' ? ' deep' : ''}`;
   const over = Math.max(0, ...(input.evaluation?.tiers ?? []).map((tier) => tier.ppfdUmolM2S.max)) > 800;
   return (
-    <div ref={root} className="relative overflow-x-clip" style={{ paddingTop: floorPx + SLAB_PX }}>
+    <div
+      ref={root}
+      onPointerDownCapture={press}
+      className="relative overflow-x-clip"
+      style={{ paddingTop: floorPx + SLAB_PX }}
+    >
       <svg
         className="absolute inset-x-0 top-0 select-none"
         width={widthPx}
