@@ -8,7 +8,7 @@ export type TentPage = 'section' | 'light' | 'climate' | 'power' | 'compare' | '
 
 interface TentFrameProps {
   gardenId: string;
-  tent: { tentId: string; name: string };
+  tent: { tentId: string; name: string; currentScenarioId?: string | null };
   room: { roomId?: string; name: string };
   /** The scenarios of the tent, in their order; each gets a letter. */
   scenarios: readonly ScenarioPlate[];
@@ -29,13 +29,16 @@ interface TentFrameProps {
 /** The pages of a tent that exist; names of pages not built yet are not shown, for nothing may dead-end. */
 function namesOf({ gardenId, tent, scenarioId, scenarios, page }: TentFrameProps): PageName[] {
   const at = `/gardens/${gardenId}/tents/${tent.tentId}/${scenarioId}`;
-  const ids = scenarios.map((each) => each.scenarioId).slice(0, 4);
+  const all = scenarios.map((each) => each.scenarioId);
+  // What the tent runs by is what others are measured against; the open one is never left out.
+  const base = all.find((id) => id === tent.currentScenarioId) ?? scenarioId;
+  const ids = [...new Set([base, scenarioId, ...all])].slice(0, 4);
   const name = (words: string, key: TentPage, href: string): PageName => ({ words, href, current: page === key });
   return [
     name('Section', 'section', at),
     name('Climate', 'climate', `${at}/climate`),
     name('Power', 'power', `${at}/power`),
-    name('Compare', 'compare', `/gardens/${gardenId}/compare?ids=${ids.join(',')}&base=${scenarioId}`),
+    name('Compare', 'compare', `/gardens/${gardenId}/compare?ids=${ids.join(',')}&base=${base}`),
   ];
 }
 
