@@ -9,7 +9,11 @@ const config: NextConfig = {
   reactCompiler: true,
   serverExternalPackages: ['@node-rs/argon2', 'pg'],
   turbopack: { root: import.meta.dirname },
-  ...(buildFolder && { distDir: buildFolder, typescript: { tsconfigPath: `${buildFolder}.tsconfig.json` } }),
+  ...(buildFolder && {
+    distDir: buildFolder,
+    // `npm test` checks the types beside the build; a second time would take half a minute more.
+    typescript: { tsconfigPath: `${buildFolder}.tsconfig.json`, ignoreBuildErrors: true },
+  }),
 };
 
 export default config;
