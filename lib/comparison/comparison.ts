@@ -1,5 +1,11 @@
 import { minorPerMajor } from '../format/money';
-import type { Device, Evaluation, ScenarioDocument, Verdict } from '../evaluation/evaluate-scenario';
+import {
+  heaterNeedW,
+  type Device,
+  type Evaluation,
+  type ScenarioDocument,
+  type Verdict,
+} from '../evaluation/evaluate-scenario';
 
 /** One scenario as a column of a comparison. */
 export interface ComparisonColumn {
@@ -54,7 +60,7 @@ export function comparisonColumn({ document, evaluation, ...names }: ComparisonS
     }),
     evenness:
       evaluation.tiers.length > 0 ? Math.min(...evaluation.tiers.map((tier) => tier.ppfdUmolM2S.minOverMean)) : null,
-    heaterNeedW: Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW),
+    heaterNeedW: heaterNeedW(heat),
     heaterRatedW: document.climate.heater?.ratedPowerW ?? 0,
     designTempC: heat.coldDark.roomTempC,
     upFrontMinor: evaluation.upFront.costMinor,

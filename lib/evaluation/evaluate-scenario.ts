@@ -5,6 +5,7 @@ export { createLightCache, type LightCache } from '@/physics/light/light-field';
 export { verticalSlice, type SliceRequest, type VerticalSlice } from '@/physics/light/vertical-slice';
 export { explainFigure } from './explain-figure';
 export type { Explanation, ExplanationTerm } from '@/physics/plan/explain';
+export { heaterNeedW, worstColdState } from '@/physics/plan/worst-cold-state';
 export { resolveScenario } from '@/physics/plan/resolve-scenario';
 export { physicsVersion } from '@/physics/plan/physics-version';
 export { defaults } from '@/physics/plan/defaults';

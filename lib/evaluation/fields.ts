@@ -9,10 +9,6 @@ export interface Expectation {
 // zod carries a message with each issue and nothing else that survives a union; the message is the key to what was expected.
 const expectations = new Map<string, Expectation>();
 
-export function expectationOf(message: string): Expectation | undefined {
-  return expectations.get(message);
-}
-
 /** Ties a fixed message to what it asks for. What depends on other fields carries it along: see `misfit`. */
 export function expecting(message: string, expectation: Expectation): string {
   expectations.set(message, expectation);
@@ -29,9 +25,9 @@ export const misfit = ({ path, message, range, unit }: Misfit) =>
   ({ code: 'custom', path, message, params: { range, unit } }) as const;
 
 /** What an issue asks for, whichever way it carries it. */
-export function expectationOfIssue(issue: z.core.$ZodIssue): Expectation | undefined {
+export function expectationOf(issue: z.core.$ZodIssue): Expectation | undefined {
   const { range, unit } = (issue.code === 'custom' && issue.params) || {};
-  return typeof range === 'string' ? { range, unit: String(unit) } : expectationOf(issue.message);
+  return typeof range === 'string' ? { range, unit: String(unit) } : expectations.get(issue.message);
 }
 
 interface QuantityOptions {

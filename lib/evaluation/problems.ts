@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { LightScene } from '@/physics/light/light-documents';
 import type { ScenarioDocument } from '@/physics/plan/scenario-document';
-import { expectationOf, expectationOfIssue } from './fields';
+import { expectationOf } from './fields';
 import { lightSceneSchema } from './light-scene.schema';
 import { scenarioSchema } from './scenario.schema';
 
@@ -65,7 +65,7 @@ function innermost(issue: Issue): Issue[] {
   const depth = (branch: Issue[]) => Math.max(0, ...branch.map((each) => each.path.length));
   const best = [...issue.errors].sort((a, b) => depth(b) - depth(a))[0]!;
   if (depth(best) === 0) {
-    const told = issue.errors.flat().find((each) => expectationOf(each.message));
+    const told = issue.errors.flat().find((each) => expectationOf(each));
     // A union with words of its own knows better than any branch.
     return told && issue.message.startsWith('Invalid input') ? [{ ...told, path: issue.path } as Issue] : [issue];
   }
@@ -85,7 +85,7 @@ function problemOf(issue: Issue, input: unknown): DocumentProblem[] {
   const value = valueAt(input, issue.path);
   const kind = issue.code === 'invalid_type' ? KINDS.get(issue.expected) : undefined;
   const wanted = kind ?? kindsOf(issue);
-  const { range, unit } = expectationOfIssue(issue) ?? { range: wanted ?? UNSAID, unit: '' };
+  const { range, unit } = expectationOf(issue) ?? { range: wanted ?? UNSAID, unit: '' };
   return [{ path: pathText(issue.path), value: brief(value), range, unit, message: messageOf(issue, value, wanted) }];
 }
 

@@ -37,6 +37,11 @@ export function setPump<P extends EditablePlan>(plan: P, inputPowerW: number | n
   return setWater(plan, { pump: inputPowerW === null ? null : { inputPowerW } });
 }
 
+/** A reservoir and a pump of common sizes, to be changed. */
+export function putInWater<P extends EditablePlan>(plan: P): P {
+  return setPump(setWater(plan, { reservoirL: 40 }), 20);
+}
+
 export function setFlood<P extends EditablePlan>(plan: P, patch: Partial<NonNullable<WaterSystem['flood']>>): P {
   return setWater(plan, { flood: { minutes: 10, everyMinutes: 120, ...plan.water?.flood, ...patch } });
 }

@@ -29,7 +29,7 @@ function weightsAt(at: number, nodes: readonly number[]): { from: number; weight
  * A slowly changing light on all cells of a plane, gathered at a grid of nodes.
  *
  * @param most nodes along a side
- * @accuracy against gathering at every cell: within 0.3 % of the mean in the tents of tests/truth/light
+ * @accuracy against gathering at every cell, in the tents of tests/truth/light: within 0.3 % of the mean, 3 % right beside pipes
  */
 export function overPlane(plane: ScenePlane, light: (point: Vec3) => number, most: number): Float64Array {
   const { x0, x1, y0, y1, nx, ny, z } = plane;

@@ -4,7 +4,7 @@ import type { LightScene, ScenePlane, Vec3 } from './light-documents';
 import { meshOf, type Patch } from './patches';
 import { overPlane } from './plane-gather';
 import type { SceneGeometry } from './scene-geometry';
-import { surfacesOf } from './surfaces';
+import { surfacesOf, type Surface } from './surfaces';
 
 /** What surfaces throw back, on any sensor plane of a scene. */
 export interface ReflectedLight {
@@ -25,8 +25,11 @@ const MOST_PATCHES = 900;
 const MOST_NODES = 1500;
 
 /** The finest mesh that is still solved; null where even the coarsest has too many patches. */
-function affordableMesh(scene: LightScene, { emitters, occluders, solids }: SceneGeometry): Patch[] | null {
-  const surfaces = surfacesOf(scene, solids, emitters);
+function affordableMesh(
+  surfaces: readonly Surface[],
+  scene: LightScene,
+  { occluders, solids }: SceneGeometry,
+): Patch[] | null {
   const cutting = solids.map(({ occluder }) => occluder);
   for (let cellM = CELL_M; cellM <= MOST_CELL_M; cellM *= COARSER) {
     const patches = meshOf(surfaces, scene, occluders, cutting, { cellM, mostPatches: MOST_PATCHES });
@@ -71,6 +74,6 @@ export function reflectedByExchange(scene: LightScene, geometry: SceneGeometry):
   // In a black tent, or a dark one, every photon is taken in where it lands first.
   if (emittedUmolS === 0 || surfaces.every(({ reflectance }) => reflectance === 0))
     return { on: ({ nx, ny }) => new Float64Array(nx * ny), absorbedUmolS: emittedUmolS };
-  const patches = affordableMesh(scene, geometry);
+  const patches = affordableMesh(surfaces, scene, geometry);
   return patches && byExchange(scene, geometry, patches);
 }

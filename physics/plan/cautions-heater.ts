@@ -1,6 +1,7 @@
 import type { Caution } from './evaluation-document';
 import { rounded, type CautionFacts } from './cautions';
 import { sources } from '../sources';
+import { heaterNeedW } from './worst-cold-state';
 
 /** Asked for where the maker's label is not known, m. @source NFPA, 3 ft on every side */
 export const USUAL_CLEARANCE_M = 1;
@@ -52,7 +53,7 @@ function clearance({ scenario }: CautionFacts): Caution[] {
 
 function sizing({ scenario, heat, slipTempC }: CautionFacts): Caution[] {
   const ratedW = scenario.climate.heater?.ratedPowerW ?? 0;
-  const needW = Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW);
+  const needW = heaterNeedW(heat);
   if (needW > ratedW + 0.5) {
     return [
       {

@@ -5,13 +5,13 @@ import { standingAt, type ExplainContext } from './explain';
 import { explainAir } from './explain-air';
 import type { Explanation, ExplanationTerm } from './explanation';
 import { rangeOf } from './uncertainty';
+import { heaterNeedW, worstColdState } from './worst-cold-state';
 
 const computed = { standing: 'computed', source: 'Computed' } as const;
 const METER =
   'Leave a plug-in power meter on the heater for one cold night: its kWh and two thermometers give the tent’s true loss.';
 const SOURCES = [sources.ISO6946.citation, sources.ASHRAE2017.citation, sources.Graamans2017.citation];
 
-const KEYS = ['coldDark', 'coldDawn', 'coldLight'] as const;
 const NAMES = {
   coldDark: 'on the coldest night',
   coldDawn: 'on the coldest morning',
@@ -63,7 +63,7 @@ export function explainHeat(context: ExplainContext, path: string, figure: strin
   }
   switch (figure) {
     case 'recommendedHeater': {
-      const need = Math.max(heat.coldDark.heaterW, heat.coldDawn.heaterW, heat.coldLight.heaterW);
+      const need = heaterNeedW(heat);
       return {
         ...common,
         title: 'Heater that holds the coldest hours',
@@ -74,7 +74,7 @@ export function explainHeat(context: ExplainContext, path: string, figure: strin
             value: need,
             unit: 'W',
             label: 'largest of night, morning and day',
-            path: `heat.${KEYS.find((key) => heat[key].heaterW === need)!}.heater`,
+            path: `heat.${worstColdState(heat)}.heater`,
             ...computed,
           },
           {
@@ -87,11 +87,7 @@ export function explainHeat(context: ExplainContext, path: string, figure: strin
           },
         ],
         result: { value: heat.recommendedHeaterW, unit: 'W' },
-        range: range(
-          (each) =>
-            Math.max(each.heat.coldDark.heaterW, each.heat.coldDawn.heaterW, each.heat.coldLight.heaterW) *
-            HEATER_MARGIN,
-        ),
+        range: range((each) => heaterNeedW(each.heat) * HEATER_MARGIN),
       };
     }
     default:

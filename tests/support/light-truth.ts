@@ -34,6 +34,9 @@ export const REFERENCE_SCENES = [
   'p08_low_hang',
 ] as const;
 
+/** Those with something that reflects. */
+export const REFLECTING_SCENES = REFERENCE_SCENES.slice(2);
+
 export const readReference = (name: (typeof REFERENCE_SCENES)[number]): LightReference =>
   readTruth<LightReference>(`${name}.json`);
 
@@ -50,3 +53,25 @@ export function blackened(scene: LightScene): LightScene {
 
 export const meanOf = (values: ArrayLike<number>): number =>
   Array.from(values).reduce((a, b) => a + b, 0) / values.length;
+
+/** How far grids, one for each plane, are from a scene's reference; percent of the reference, rms of its mean. */
+export function againstReference(
+  name: (typeof REFERENCE_SCENES)[number],
+  gridsOf: (scene: LightScene) => ArrayLike<number>[],
+) {
+  const { scene, reference } = readReference(name);
+  const grids = gridsOf(scene);
+  const emitted = scene.fixtures.reduce((sum, { ppf }) => sum + ppf, 0);
+  return reference.planes.map(({ id, mean, min, ppfd, direct }, at) => {
+    const grid = Array.from(grids[at]!);
+    const { x0, x1, y0, y1 } = scene.planes[at]!;
+    return {
+      name: `${name.slice(0, 3)} ${id}`,
+      meanPct: 100 * (meanOf(grid) / mean - 1),
+      minPct: 100 * (Math.min(...grid) / min - 1),
+      rmsPct: (100 * Math.sqrt(meanOf(grid.map((value, i) => (value - ppfd[i]!) ** 2)))) / mean,
+      directShare: meanOf(direct) / mean,
+      shareOfPhotons: (mean * (x1 - x0) * (y1 - y0)) / emitted,
+    };
+  });
+}

@@ -53,10 +53,9 @@ function Headline({ moved }: { moved: boolean }) {
 export function LandingTent({ document: example, crops }: { document: ScenarioDocument; crops: LandingCrop[] }) {
   const draft = useDraft();
   const [edited, setEdited] = useState<ScenarioDocument | null>(null);
-  const [drawing, setDrawing] = useState(false);
   const doc = edited ?? draft ?? example;
   // A drawing of one's own, from today or from before: its fields stand where the example's words would.
-  const own = drawing || doc.name === OWN_NAME;
+  const own = doc.name === OWN_NAME;
   const change = (next: ScenarioDocument) => {
     setEdited(next);
     keepDraft(next);
@@ -99,20 +98,13 @@ export function LandingTent({ document: example, crops }: { document: ScenarioDo
                   Keep this tent
                 </TextLink>
                 {own ? (
-                  <Button
-                    look="plain"
-                    onClick={() => {
-                      setDrawing(false);
-                      change(example);
-                    }}
-                  >
+                  <Button look="plain" onClick={() => change(example)}>
                     Back to the example
                   </Button>
                 ) : (
                   <Button
                     look="plain"
                     onClick={() => {
-                      setDrawing(true);
                       // The button stands at the foot; the empty tent begins at the top.
                       window.scrollTo({ top: 0 });
                       change(emptied(example));

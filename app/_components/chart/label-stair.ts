@@ -28,7 +28,7 @@ const GAP_PX = 8;
 
 function put(fromPx: number, wordsPx: number, anchor: 'start' | 'end', placed: readonly Placed[]): Placed {
   const toPx = fromPx + wordsPx;
-  const met = placed.filter((other) => other && other.fromPx < toPx && other.toPx > fromPx);
+  const met = placed.filter((other) => other.fromPx < toPx && other.toPx > fromPx);
   const level = met.length === 0 ? 0 : Math.max(...met.map((other) => other.level)) + 1;
   const gapPx = level > 0 ? GAP_PX : 1;
   return anchor === 'start'

@@ -21,7 +21,9 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
   const [open, setOpen] = useState<number | null>(null);
   const [all, setAll] = useState(false);
   const units = useUnits();
-  const cautions = [...(context.evaluation?.cautions ?? [])].sort((a, b) => order(a.severity) - order(b.severity));
+  const cautions = (context.evaluation?.cautions ?? [])
+    .map((caution) => ({ ...caution, text: sentenceInUnits(caution.text, units) }))
+    .sort((a, b) => order(a.severity) - order(b.severity));
   if (cautions.length === 0)
     return <p className="text-12 text-ink-soft">No cautions. Local code and the makers’ instructions still stand.</p>;
   const shown = all ? cautions : cautions.slice(0, most);
@@ -40,11 +42,11 @@ export function CautionsList({ context, most = 3 }: { context: SectionContext; m
               className="cursor-pointer border-b border-dotted border-ink-soft py-1 text-left"
               onClick={() => setOpen(open === i ? null : i)}
             >
-              {cautionHead(sentenceInUnits(caution.text, units))}
+              {cautionHead(caution.text)}
             </button>
             {open === i && (
               <div className="my-1 border-l-[3px] border-ember bg-sheet py-1 pr-2 pl-3">
-                <p>{sentenceInUnits(caution.text, units)}</p>
+                <p>{caution.text}</p>
                 <p className="text-ink-soft">{caution.source}</p>
               </div>
             )}

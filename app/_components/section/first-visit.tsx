@@ -3,7 +3,7 @@
 /** A tent with nothing in it teaches: its three sizes, one sentence, one button. */
 import { addLamp } from '@/lib/scenarios/edit-plan';
 import { addTier } from '@/lib/scenarios/edit-rack';
-import { setPump, setWater } from '@/lib/scenarios/edit-climate';
+import { putInWater } from '@/lib/scenarios/edit-climate';
 import { placeForLamp } from '@/lib/scenarios/lamp-range';
 import { Button } from '../button';
 import { QuantityField } from '../quantity-field';
@@ -23,7 +23,7 @@ export function FirstVisit({ context }: { context: SectionContext }) {
         next = addTier(next, tent, Math.round(tent.heightM * 25) / 100).plan;
         next = addTier(next, tent, Math.round(tent.heightM * 62) / 100).plan;
       }
-      if (!next.water) next = setPump(setWater(next, { reservoirL: 40 }), 20);
+      if (!next.water) next = putInWater(next);
       if (lamp)
         for (const tier of next.tiers) {
           const rack = { tiers: next.tiers, placements: next.placements, fixtures, tent };

@@ -1,6 +1,7 @@
 'use client';
 
 /** Left of the tent: what burns and what blows, and the inspector of the one thing that is chosen. */
+import { heaterNeedW, worstColdState } from '@/lib/evaluation/evaluate-scenario';
 import { Sentence } from '../sentence';
 import { Explainable } from '../explain';
 import { Num } from '../num';
@@ -138,13 +139,6 @@ export function HeaterWords({ context, short }: { context: SectionContext; short
   );
 }
 
-type State = 'coldDark' | 'coldDawn' | 'coldLight';
-const STATES: readonly State[] = ['coldDark', 'coldDawn', 'coldLight'];
-
-function worstState({ evaluation }: SectionContext): State {
-  return STATES.reduce((worst, state) =>
-    (evaluation?.heat[state].heaterW ?? 0) > (evaluation?.heat[worst].heaterW ?? 0) ? state : worst,
-  );
-}
-const worstHeatW = (context: SectionContext) => context.evaluation?.heat[worstState(context)].heaterW ?? 0;
-const worstHeatPath = (context: SectionContext) => `heat.${worstState(context)}.heater`;
+const worstHeatW = ({ evaluation }: SectionContext) => (evaluation ? heaterNeedW(evaluation.heat) : 0);
+const worstHeatPath = ({ evaluation }: SectionContext) =>
+  `heat.${evaluation ? worstColdState(evaluation.heat) : 'coldDark'}.heater`;

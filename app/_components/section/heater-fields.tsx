@@ -1,15 +1,12 @@
 'use client';
 
-import type { Evaluation } from '@/lib/evaluation/evaluate-scenario';
 import { setHeater } from '@/lib/scenarios/edit-climate';
 import { Choice } from '../choice';
 import { CheckField } from '../check-field';
 import { QuantityField } from '../quantity-field';
-import { Sentence } from '../sentence';
-import { InspectorFrame, More, Pair, Verb } from './inspector';
+import { FieldCautions } from './field-cautions';
+import { InspectorFrame, Pair, Verb } from './inspector';
 import type { SectionContext } from './section-context';
-
-type Caution = Evaluation['cautions'][number];
 
 const UNKNOWN_CLEARANCE_M = 1;
 
@@ -37,7 +34,7 @@ export function HeaterFields({ context }: { context: SectionContext }) {
       context={context}
       title="Heater"
       facts={advised > 0 ? `The cold asks for ${words.say(advised, 'power')}, with a quarter in hand.` : undefined}
-      foot={<HeaterCautions cautions={cautions} />}
+      foot={<FieldCautions cautions={cautions} />}
       hint="Its arrow is as wide as its watts on average in the told month."
       verbs={
         <Verb
@@ -95,26 +92,6 @@ export function HeaterFields({ context }: { context: SectionContext }) {
         onChange={(owned) => patch({ owned }, 'heater owned')}
       />
     </InspectorFrame>
-  );
-}
-
-/** The first in full, since it decides where the heater stands; the others a line away. */
-function HeaterCautions({ cautions }: { cautions: readonly Caution[] }) {
-  const [first, ...others] = cautions;
-  if (!first) return null;
-  const say = (caution: Caution) => (
-    <p key={caution.code + caution.where} className="max-w-[26rem] text-12">
-      <span className="font-semibold text-ember-ink">Caution.</span> <Sentence text={caution.text} />{' '}
-      <span className="text-ink-soft">{caution.source}</span>
-    </p>
-  );
-  return (
-    <div className="mt-2 flex flex-col gap-1.5">
-      {say(first)}
-      {others.length > 0 && (
-        <More words={`${others.length} more to read before it is plugged in`}>{others.map(say)}</More>
-      )}
-    </div>
   );
 }
 

@@ -2,7 +2,7 @@
 
 /** What stands beside the tent in the room: its air, what may be added, the circuits, the key of the drawing. */
 import { useState } from 'react';
-import { setExhaust, setHeater, setPump, setWater } from '@/lib/scenarios/edit-climate';
+import { putInWater, setExhaust, setHeater } from '@/lib/scenarios/edit-climate';
 import { addLamp, freshId } from '@/lib/scenarios/edit-plan';
 import { addTier } from '@/lib/scenarios/edit-rack';
 import { placeForLamp } from '@/lib/scenarios/lamp-range';
@@ -16,7 +16,6 @@ import { MONTHS } from './month-names';
 
 /** The smallest that is common, m³/h. */
 const LEAST_FAN_M3H = 100;
-const putInWater: PlanChange = (plan) => setPump(setWater(plan, { reservoirL: 40 }), 20);
 
 const dotted = 'cursor-pointer border-b border-dotted border-ink-soft text-left';
 

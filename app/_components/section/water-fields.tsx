@@ -3,7 +3,7 @@
 import { setFlood, setPump, setWater } from '@/lib/scenarios/edit-climate';
 import { planDefault } from '@/lib/scenarios/plan-defaults';
 import { QuantityField } from '../quantity-field';
-import { Sentence } from '../sentence';
+import { FieldCautions } from './field-cautions';
 import { InspectorFrame, Verb } from './inspector';
 import type { SectionContext } from './section-context';
 import { DefaultField } from './tier-fields';
@@ -22,6 +22,7 @@ export function WaterFields({ context }: { context: SectionContext }) {
     <InspectorFrame
       context={context}
       title="Water"
+      foot={<FieldCautions cautions={cautions} />}
       hint="The pump floods the trays on its timer, lamps on or off."
       verbs={
         pump ? (
@@ -87,12 +88,6 @@ export function WaterFields({ context }: { context: SectionContext }) {
           />
         </>
       )}
-      {cautions.map((caution) => (
-        <p key={caution.code + caution.where} className="w-[20rem] max-w-full text-12">
-          <span className="font-semibold text-ember-ink">Caution.</span> <Sentence text={caution.text} />{' '}
-          <span className="text-ink-soft">{caution.source}</span>
-        </p>
-      ))}
     </InspectorFrame>
   );
 }

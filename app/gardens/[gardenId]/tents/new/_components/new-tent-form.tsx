@@ -29,7 +29,8 @@ export function NewTentForm({ gardenId, rooms, wanted }: NewTentFormProps) {
   const [tentId] = useState(() => crypto.randomUUID());
   const [roomId, setRoomId] = useState(wanted);
   const [name, setName] = useState('');
-  const [sizes, setSizes] = useState<TentSizes>(firstSizes[useUnits()]);
+  const units = useUnits();
+  const [sizes, setSizes] = useState<TentSizes>(firstSizes[units]);
   const [tiers, setTiers] = useState<TierCount>('2');
   const [problem, setProblem] = useState<{ name?: string; form?: string }>({});
   const field = useRef<HTMLInputElement>(null);

@@ -1,16 +1,16 @@
 import { formatQuantity, type UnitSystem } from '@/lib/format/quantity';
-import type { Evaluation, ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
+import {
+  heaterNeedW,
+  worstColdState,
+  type Evaluation,
+  type ScenarioDocument,
+} from '@/lib/evaluation/evaluate-scenario';
 
 interface Facts {
   document: ScenarioDocument;
   evaluation: Evaluation;
   units: UnitSystem;
 }
-
-/** The state that needs most heat: not always the night, since the day is kept warmer. */
-const worstState = ({ heat }: Evaluation) =>
-  [heat.coldDark, heat.coldDawn, heat.coldLight].reduce((most, state) => (state.heaterW > most.heaterW ? state : most));
-const needOf = (evaluation: Evaluation) => worstState(evaluation).heaterW;
 
 /** The coldest hour a tent slips to, over the year; the set-point where it holds. */
 const coldest = ({ year }: Evaluation) => Math.min(...year.months.map((month) => month.airTempC.min));
@@ -19,13 +19,13 @@ const coldest = ({ year }: Evaluation) => Math.min(...year.months.map((month) =>
 export function climateHeadline({ document, evaluation, units }: Facts): string {
   const watt = (value: number) => formatQuantity(value, 'power', units).text;
   const degrees = (value: number) => formatQuantity(value, 'temperature', units).text;
-  const need = needOf(evaluation);
+  const need = heaterNeedW(evaluation.heat);
   const rated = document.climate.heater?.ratedPowerW ?? 0;
   if (need > rated + 0.5) {
     const slips = coldest(evaluation);
     return rated > 0
       ? `In the coldest hours the heater falls ${watt(need - rated)} short, and the tent slips to ${degrees(slips)}.`
-      : `Without a heater the tent falls to ${degrees(slips)}. Holding ${degrees(worstState(evaluation).tentTempC)} takes ${watt(need)}.`;
+      : `Without a heater the tent falls to ${degrees(slips)}. Holding ${degrees(evaluation.heat[worstColdState(evaluation.heat)].tentTempC)} takes ${watt(need)}.`;
   }
   const { hotLight } = evaluation.heat;
   const fan = document.climate.exhaust?.maxAirflowM3H ?? 0;
@@ -41,7 +41,7 @@ export function climateHeadline({ document, evaluation, units }: Facts): string 
 /** The remedy. */
 export function climateLead({ document, evaluation, units }: Facts): string {
   const { heat } = evaluation;
-  const need = needOf(evaluation);
+  const need = heaterNeedW(evaluation.heat);
   const rated = document.climate.heater?.ratedPowerW ?? 0;
   if (need > rated + 0.5 && heat.recommendedHeaterW > 0) {
     return `${formatQuantity(heat.recommendedHeaterW, 'power', units).text} would hold it, with a quarter or more to spare. A quilt round the tent or a warmer room needs less.`;

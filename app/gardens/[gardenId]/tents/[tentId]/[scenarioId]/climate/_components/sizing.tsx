@@ -82,7 +82,7 @@ export function Sizing({ document, evaluation }: SizingProps) {
           />
         </ul>
         <p className="pt-3 text-14">
-          Held at what is to be kept, the wall stands{' '}
+          With the tent held warm, the wall stands{' '}
           <Explainable path="heat.wallDewMargin">
             <Figure value={Math.abs(heat.wallDewMarginK)} kind="temperatureDifference" />
           </Explainable>{' '}

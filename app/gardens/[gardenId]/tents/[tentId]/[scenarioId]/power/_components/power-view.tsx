@@ -7,7 +7,7 @@ import { CautionNote } from '@/app/_components/caution-note';
 import { Explainable } from '@/app/_components/explain';
 import { TextLink } from '@/app/_components/link';
 import { TableBehind } from '@/app/_components/table-behind';
-import type { Device, Evaluation, ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
+import { heaterNeedW, type Device, type Evaluation, type ScenarioDocument } from '@/lib/evaluation/evaluate-scenario';
 import { figureText } from '@/lib/format/figure';
 import { formatMoney, formatPrice } from '@/lib/format/money';
 import type { Workbench } from '@/lib/scenarios/scenario.schema';
@@ -43,9 +43,7 @@ export function PowerView({ workbench, document, evaluation }: PowerViewProps) {
   const { year } = evaluation;
   const cautions = evaluation.cautions.filter((caution) => /^(circuit|water|heater|plan)\./.test(caution.code));
   const net = year.netLightEnergyKwh;
-  const { coldDark, coldDawn, coldLight } = evaluation.heat;
-  const missingW =
-    Math.max(coldDark.heaterW, coldDawn.heaterW, coldLight.heaterW) - (document.climate.heater?.ratedPowerW ?? 0);
+  const missingW = heaterNeedW(evaluation.heat) - (document.climate.heater?.ratedPowerW ?? 0);
   const lead =
     missingW > 0.5
       ? `Not in it: the ${figureText(missingW, 0)} W of heat that are missing in the coldest hours. A tent that is held warm costs more.`
