@@ -9,7 +9,7 @@ export interface CautionFacts {
   scenario: ResolvedScenario;
   tiers: TierResult[];
   heat: HeatResult;
-  /** All zero while a lamp is being dragged. */
+  /** Without months while a lamp is being dragged. */
   year: YearResult;
   circuits: CircuitResult[];
   /** What the tent slips to in the coldest hours with the heater that is planned; null where it holds. */

@@ -8,7 +8,7 @@ import { solveTierLight, type TierLight } from '../light/tier-light';
 import { roomYear, type RoomYear } from '../room/room-year';
 import { cautionsFor } from './cautions';
 import { circuitResults } from './circuits';
-import type { Assumption, Evaluation, HeatResult, MonthResult, YearResult } from './evaluation-document';
+import type { Assumption, Evaluation, HeatResult, YearResult } from './evaluation-document';
 import { physicsVersion } from './physics-version';
 import { resolveScenario } from './resolve-scenario';
 import type { ResolvedScenario } from './resolved-scenario';
@@ -45,22 +45,10 @@ function upFrontMinor(scenario: ResolvedScenario): number {
 
 const noEnergy = () => ({ light: 0, heater: 0, exhaust: 0, circulation: 0, pump: 0 });
 
+/** A year that was not asked for has no months, so that nobody takes a zero for a figure. */
 function emptyYear(): YearResult {
-  const months = Array.from({ length: 12 }, (_, index): MonthResult => ({
-    month: index + 1,
-    energyKwh: { ...noEnergy(), total: 0 },
-    cost: 0,
-    costByDevice: noEnergy(),
-    airTempC: { min: 0, mean: 0, max: 0 },
-    relHumidityPct: { min: 0, mean: 0, max: 0 },
-    vpdKpa: { mean: 0 },
-    unmetHeatKh: 0,
-    overheatKh: 0,
-    condensationH: 0,
-    waterL: 0,
-  }));
   return {
-    months,
+    months: [],
     energyKwh: { ...noEnergy(), total: 0 },
     cost: 0,
     costByDevice: noEnergy(),

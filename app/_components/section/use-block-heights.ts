@@ -1,13 +1,14 @@
 'use client';
 
-import { useEffect, useState } from 'react';
+import { useLayoutEffect, useState } from 'react';
 
 export type BlockHeights = Readonly<Record<string, number>>;
 
 /** Heights of the sentences beside the drawing as the browser set them; until then the estimates stand. */
 export function useBlockHeights(container: React.RefObject<HTMLElement | null>): BlockHeights {
   const [heights, setHeights] = useState<BlockHeights>({});
-  useEffect(() => {
+  // Before the browser paints: an estimate that is too small would flash words over the bill.
+  useLayoutEffect(() => {
     const root = container.current;
     if (!root) return;
     const read = () => {

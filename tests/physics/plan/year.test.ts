@@ -225,3 +225,9 @@ describe('the pump’s highest five minutes', () => {
     expect(pumpPeakW({ pumpW: 25, flood: { minutes, everyMinutes } } as never)).toBeCloseTo(watts, 12),
   );
 });
+
+describe('a year', () => {
+  it('that was not asked for has no months, so that no zero can pass for a figure', () => {
+    expect(evaluateScenario(rackScenario({ lamps: 2, tiers: 2 }), { year: false }).year.months).toEqual([]);
+  });
+});

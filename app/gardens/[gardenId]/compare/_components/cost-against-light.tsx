@@ -28,6 +28,23 @@ function pointsOf(columns: readonly ComparisonColumn[]): Point[] {
   });
 }
 
+const ROW_PX = 15;
+
+/** Names over their points, inside the drawing, each in the first row where it meets no other. */
+function namesOf(points: readonly Point[], x: (cost: number) => number, widthPx: number) {
+  const ends: number[] = [];
+  const rows = new Map<string, { middlePx: number; row: number }>();
+  for (const { id, name, cost } of [...points].sort((a, b) => a.cost - b.cost)) {
+    const half = textWidthPx(name) / 2 + 4;
+    const middlePx = Math.min(Math.max(x(cost), 52 + half), widthPx - 12 - half);
+    const free = ends.findIndex((end) => end <= middlePx - half);
+    const row = free < 0 ? ends.length : free;
+    ends[row] = middlePx + half;
+    rows.set(id, { middlePx, row });
+  }
+  return points.map(({ id }) => rows.get(id)!);
+}
+
 /** Better lies up and to the left: each scenario's tiers as a share of the least light they need, against its money a month. */
 export function CostAgainstLight({ columns }: { columns: readonly ComparisonColumn[] }) {
   const [ref, widthPx] = useWidth<HTMLDivElement>(860);
@@ -40,9 +57,11 @@ export function CostAgainstLight({ columns }: { columns: readonly ComparisonColu
     .domain([Math.max(0, Math.min(...costs) - pad), Math.max(...costs) + pad])
     .nice()
     .range([52, widthPx - 12]);
+  const names = namesOf(points, x, widthPx);
+  const topPx = 4 + ROW_PX * Math.max(2, ...names.map(({ row }) => row + 1));
   const y = scaleLinear()
     .domain([0, Math.max(1.3, ...points.map((point) => point.best)) * 1.08])
-    .range([HEIGHT - 44, 34]);
+    .range([HEIGHT - 44, topPx]);
   return (
     <section className="border-t border-line pt-8 mt-10">
       <h2 className="text-22">Cost against light</h2>
@@ -76,10 +95,7 @@ export function CostAgainstLight({ columns }: { columns: readonly ComparisonColu
             enough
           </text>
           {points.map((point, at) => {
-            const nameX = Math.min(
-              Math.max(x(point.cost), 52 + textWidthPx(point.name) / 2),
-              widthPx - 12 - textWidthPx(point.name) / 2,
-            );
+            const { middlePx, row } = names[at]!;
             return (
               <g key={point.id}>
                 <line
@@ -107,8 +123,8 @@ export function CostAgainstLight({ columns }: { columns: readonly ComparisonColu
                   strokeWidth="1.75"
                 />
                 <text
-                  x={nameX}
-                  y={14 + (at % 2) * 15}
+                  x={middlePx}
+                  y={14 + row * ROW_PX}
                   fontSize="12"
                   fontWeight="600"
                   textAnchor="middle"
@@ -119,7 +135,7 @@ export function CostAgainstLight({ columns }: { columns: readonly ComparisonColu
                 <line
                   x1={x(point.cost)}
                   x2={x(point.cost)}
-                  y1={18 + (at % 2) * 15}
+                  y1={18 + row * ROW_PX}
                   y2={y(point.best)}
                   stroke="var(--line)"
                 />
