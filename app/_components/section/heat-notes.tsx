@@ -91,7 +91,8 @@ export function heaterNote(context: SectionContext): NoteBlock[] {
     {
       id: 'heater',
       node: chosen ? <Inspector context={context} /> : <HeaterWords context={context} short={selection !== null} />,
-      estimatePx: chosen ? 330 : 74,
+      // With its caution, which it loses while something else is chosen.
+      estimatePx: chosen ? 330 : selection ? 74 : 150,
       wantedTopPx: tent.y1 - 128,
       toPx: heater ? [heater.box.x0 + 1, heater.box.y0 + 14] : null,
       selected: chosen,
